@@ -1,0 +1,3 @@
+"""Asfound's solver: is a beam as found still inside the limits that its designer gave? Start reading at check.py."""
+
+__version__ = "0.1.0"

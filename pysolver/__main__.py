@@ -1,0 +1,5 @@
+"""python -m pysolver"""
+
+from pysolver.cli import main
+
+raise SystemExit(main())

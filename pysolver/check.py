@@ -1,0 +1,152 @@
+"""READ THIS FIRST. One check, from a record to its outcome.
+
+    record --validated--> read_all --> model (beam, loads, criteria, factors)
+           --> govern (best estimates, then the worst of the box) --> gaps and distress --> decide --> Result
+
+Everything a person can have written wrongly ends as an InputError in `errors`, with its field; the numbers that can be
+worked out all the same are worked out (J23). SI units and signs as in statics.py.
+"""
+
+from dataclasses import dataclass
+from typing import Any
+
+import numpy as np
+
+from pysolver.combinations import sets
+from pysolver.envelope import along as effect_along
+from pysolver.errors import InputError
+from pysolver.facts import Gap, distressed, gaps
+from pysolver.found import missing
+from pysolver.governing import LIFTS, Governed, govern, infinite_hold_down, least_reaction, total_load
+from pysolver.limits import capacity_at, set_of
+from pysolver.model import Model, model, stiffness_known, stiffness_needed
+from pysolver.outcome import Compared, Outcome, decide
+from pysolver.readings import Readings, read_all
+from pysolver.record import Record, validated
+from pysolver.statics import Response, extremes, solve
+
+NEGLIGIBLE = 1e-9  # share of the largest effect below which an effect counts as zero (rounding)
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Result:
+    """What came out. model, governed and response are None while the beam is not complete."""
+
+    record: Record
+    readings: Readings
+    errors: tuple[InputError, ...]
+    outcome: Outcome
+    compared: tuple[Compared, ...] = ()
+    model: Model | None = None
+    governed: Governed | None = None
+    response: Response | None = None
+    full: bool = True
+
+
+def run_check(document: Any, *, full: bool = True) -> Result:
+    """The whole check of a record. full: with ranges; otherwise best estimates only, while the ranges are worked out.
+
+    Raises InputError only when the document is no record at all.
+    """
+    record = validated(document)
+    readings = read_all(record)
+    unfinished = [*blocking(readings), *missing(record, readings), *stiffness_asked(record, readings)]
+    if unfinished:
+        return _unfinished(record, readings, unfinished)
+    try:
+        ready = model(record, readings)
+        layout = ready.layouts(ready.best_point()[None, :], ready.ways[0])[0]
+        response = solve(layout.beam, layout.loads)
+        facts = gaps(record, readings, layout)
+        governed = govern(ready, facts, full=full)
+    except InputError as error:
+        return _unfinished(record, readings, [error])
+    compared = (*governed.compared, *infinite_hold_down(ready, governed.best, governed.least))
+    outcome = decide(compared, facts, distressed=distressed(record), uncovered=uncovered(ready, governed, response),
+                     lifting=lifting(ready, governed), from_memory=_from_memory(record))
+    return Result(record=record, readings=readings, errors=(*readings.errors, *ready.errors), outcome=outcome,
+                  compared=compared, model=ready, governed=governed, response=response, full=full)
+
+
+def blocking(readings: Readings) -> list[InputError]:
+    """Numbers of the beam and its loads that could not be read: a load that is not understood is not left out."""
+    return [e for e in readings.errors if not e.field.startswith("/limits") and not e.field.startswith("/restraint")]
+
+
+def stiffness_asked(record: Record, readings: Readings) -> list[InputError]:
+    """J12: with springs, settlement or changes of EI the moments depend on EI, so it must be known."""
+    if not stiffness_needed(record) or stiffness_known(record, readings):
+        return []
+    return [InputError(code="missing", field="/section/stiffness", message="With a spring, a settlement or a change of "
+                       "stiffness the moments depend on the stiffness EI. Enter EI with its range.")]
+
+
+def _unfinished(record: Record, readings: Readings, wrong: list[InputError]) -> Result:
+    found = [Gap(text=error.message.rstrip("."), who="you, from where you stand", path=error.field) for error in wrong]
+    outcome = decide([], found, distressed=distressed(record), uncovered=[], lifting=[], from_memory=False)
+    known = {(e.field, e.message) for e in readings.errors}
+    errors = (*readings.errors, *(e for e in wrong if (e.field, e.message) not in known and e.code != "missing"))
+    return Result(record=record, readings=readings, errors=errors, outcome=outcome)
+
+
+def _from_memory(record: Record) -> bool:
+    used = {set_of(sheet) for sheet in record["limits"] if sheet["basis"] in ("factored", "unfactored")}
+    return any(s in sets() and sets()[s].from_memory for s in used if s)
+
+
+def lifting(ready: Model, governed: Governed) -> list[Gap]:
+    """J20, until contact is solved: a bearing with a negative reaction in any case or corner is not judged."""
+    found = []
+    size = total_load(governed.best)
+    for j in governed.best.layouts[0].real:
+        support = ready.record["supports"][j]
+        if support["kind"] != "bearing":
+            continue
+        share = min(governed.least.get(j, 0.0), float(least_reaction(governed.best, ready, j, best=True)[0]) / size)
+        if share < -LIFTS:
+            found.append(Gap(text=f"the end at {support['name']} would lift" if j in (0, len(ready.record["supports"]) - 1)
+                             else f"the beam would lift off {support['name']}",
+                             who="the office: a bearing that opens is not judged here", path=f"/supports/{j}/kind"))
+    return found
+
+
+def uncovered(ready: Model, governed: Governed, response: Response) -> list[Gap]:
+    """J22: sagging, hogging and shear must each have a limit wherever their effect is not zero."""
+    words = {"sagging": "sagging moment", "hogging": "hogging moment", "shear": "shear"}
+    found = []
+    for kind, name in words.items():
+        where = _without_limit(ready, governed, response, kind)
+        if where is not None:
+            has_any = any(one.criterion.kind == kind for one in ready.judged)
+            place = f" at {where:.2f} m from the left end" if has_any else ""
+            found.append(Gap(text=f"no limit given for {name}{place}", who="the office that issued the limits", path="/limits"))
+    return found
+
+
+def _without_limit(ready: Model, governed: Governed, response: Response, kind: str) -> float | None:
+    """The place (m) of the largest effect of a kind where no criterion has a capacity; None when there is none."""
+    layout = governed.best.layouts[0]
+    limits = [one.criterion for one in ready.judged if one.criterion.kind == kind]
+    low, high = _effect_ends(ready, governed, kind)
+    x = governed.best.batch.x[0]
+    size = max(abs(e.value) for e in extremes(response, "shear" if kind == "shear" else "moment"))
+    worst, place = NEGLIGIBLE * max(size, float(high.max(initial=0.0))), None
+    for p, middle in enumerate(0.5 * (x[:-1] + x[1:])):
+        if all(capacity_at(c, float(middle), layout) is None for c in limits):
+            effect = max(float(low[p]), float(high[p]))
+            if effect > worst:
+                worst, place = effect, float(middle)
+    return place
+
+
+def _effect_ends(ready: Model, governed: Governed, kind: str) -> tuple[Any, Any]:
+    """(P,), (P,) a bound of the effect on each piece: all sources at the ends of their ranges, places along the piece."""
+    batch = governed.best.batch
+    coefficients = {"sagging": batch.moment, "hogging": -batch.moment, "shear": batch.shear}[kind]
+    lengths = np.diff(batch.x, axis=1)
+    s = np.linspace(0.0, 1.0, 5) * lengths[..., None]
+    low = np.array([0.0 for _ in ready.sources])
+    high = np.array([source.high for source in ready.sources])
+    up = effect_along(coefficients, s, low, high)[0].max(axis=1)
+    down = effect_along(-coefficients, s, low, high)[0].max(axis=1) if kind == "shear" else up
+    return down, up

@@ -1,0 +1,97 @@
+"""Where on a drawing can a label stand without covering another? Boxes in viewBox units, y down.
+
+Text is measured by count of characters (WIDE of the font size each, a little more than the mean of sans-serif figures),
+since no font is at hand where the drawings are made.
+"""
+
+from collections.abc import Iterable, Sequence
+from dataclasses import dataclass, field
+
+from pysolver import svg
+
+WIDE = 0.58
+GAP = 2.0
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Box:
+    x0: float
+    y0: float
+    x1: float
+    y1: float
+
+    def meets(self, other: "Box") -> bool:
+        return self.x0 < other.x1 and other.x0 < self.x1 and self.y0 < other.y1 and other.y0 < self.y1
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Place:
+    """A place for a label: baseline point, anchor, and whether it is written upwards."""
+
+    x: float
+    y: float
+    anchor: str = "middle"
+    turned: bool = False
+
+
+def width_of(words: str, size: float = svg.PLAIN) -> float:
+    return WIDE * size * len(svg.clean(words))
+
+
+def box_of(words: str, place: Place, size: float = svg.PLAIN) -> Box:
+    """The paper that a label takes, with a little air round it."""
+    long = width_of(words, size)
+    before = {"start": 0.0, "middle": long / 2, "end": long}[place.anchor]
+    if place.turned:
+        return Box(x0=place.x - 0.8 * size - 1, x1=place.x + 0.2 * size + 1, y0=place.y - long + before - GAP,
+                   y1=place.y + before + GAP)
+    return Box(x0=place.x - before - GAP, x1=place.x - before + long + GAP, y0=place.y - 0.8 * size - 1,
+               y1=place.y + 0.25 * size + 1)
+
+
+@dataclass(slots=True)
+class Sheet:
+    """What is taken already. hard: texts, never to be covered; soft: lines, covered only when nothing else is left."""
+
+    frame: Box
+    hard: list[Box] = field(default_factory=list)
+    soft: list[Box] = field(default_factory=list)
+
+    def room(self, words: str, places: Iterable[Place], size: float = svg.PLAIN) -> Place | None:
+        """The first place that covers nothing, else the first that covers the fewest lines, else None."""
+        best: tuple[int, Place] | None = None
+        for place in places:
+            box = box_of(words, place, size)
+            if not self._inside(box) or any(box.meets(other) for other in self.hard):
+                continue
+            covered = sum(box.meets(other) for other in self.soft)
+            if covered == 0:
+                return place
+            if best is None or covered < best[0]:
+                best = covered, place
+        return best[1] if best else None
+
+    def write(self, words: str, places: Sequence[Place], classes: str = "label", size: float = svg.PLAIN) -> str | None:
+        """The label written at the best of the places, which is then taken; None when there is no room."""
+        place = self.room(words, places, size)
+        if place is None:
+            return None
+        self.hard.append(box_of(words, place, size))
+        return svg.text(place.x, place.y, words, classes, anchor=place.anchor, size=size, turned=place.turned)
+
+    def _inside(self, box: Box) -> bool:
+        return (box.x0 >= self.frame.x0 and box.x1 <= self.frame.x1 and box.y0 >= self.frame.y0
+                and box.y1 <= self.frame.y1)
+
+
+def rows(extents: Sequence[tuple[float, float]]) -> list[int]:
+    """For each (from, to) in turn the lowest row in which it overlaps nothing placed before it."""
+    taken: list[list[tuple[float, float]]] = []
+    chosen = []
+    for start, end in extents:
+        row = next((k for k, others in enumerate(taken) if all(end <= a or b <= start for a, b in others)), len(taken))
+        if row == len(taken):
+            taken.append([])
+        taken[row].append((start, end))
+        chosen.append(row)
+    return chosen

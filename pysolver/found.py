@@ -1,0 +1,323 @@
+"""What beam stands there, and what rests on it, for one choice of every measured number?
+
+lay_out() turns a record and its readings into a Layout: the beam, the loads, and where supports and faces are. It is
+called with the best estimates first and then with every point of the box of uncertain lengths and positions.
+
+Effective span (J8): a span measured between faces ("clear") is widened at an end support by min(bearing, depth)/2, or by
+half the bearing when the limit's rule is centre to centre (EN 1992-1-1, 5.3.2.2, for the first). A support between two
+spans keeps its middle. A bearing found shorter than drawn never shortens a span: the longer of both is used.
+"""
+
+from collections.abc import Callable
+from dataclasses import dataclass
+from itertools import pairwise
+from typing import Any
+
+from pysolver.beam import Beam, Stretch, Support
+from pysolver.errors import InputError
+from pysolver.loads import AppliedMoment, LineLoad, Load, PointLoad
+from pysolver.readings import Readings
+from pysolver.record import Record
+
+SELF_WEIGHT = "self weight"
+ANY_STIFFNESS = 1e7  # N·m²; M, V and R of a beam of one EI without springs or settlement do not depend on it (J12)
+
+STICKS_OUT = 0.03  # m, own rule: tape and edge of a load together
+
+Pick = Callable[[str], float]  # the value chosen for the measured number at a path; KeyError when it is not answered
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Layout:
+    """One choice of everything measured. x in m from the left end of the beam.
+
+    supports: x of every support of the record (a free end: its tip); real: the index in the record of each support that
+    the beam has; faces: (left face, right face) of each; spans: (start, end) of each span; zones: (start, end) of each zone
+    of a limit by its path; drawn: the drawn length of a span by its index.
+    """
+
+    beam: Beam
+    loads: tuple[Load, ...]
+    supports: tuple[float, ...]
+    real: tuple[int, ...]
+    faces: tuple[tuple[float, float], ...]
+    spans: tuple[tuple[float, float], ...]
+    zones: dict[str, tuple[float, float]]
+    drawn: dict[int, float]
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Reading:
+    """How the beam is read: the span rule of the limit and where the reactions of an overhanging beam are taken.
+
+    edges: reactions at the front edges: under an overhang at the edge towards its tip, at the other end supports at the
+    inner edge (J8: run too, since it shortens the arm that holds the beam down).
+    strict: a load off the beam is an error; otherwise (inside the search) it is moved onto it.
+    """
+
+    rule: str = "effective"
+    edges: bool = False
+    strict: bool = True
+
+
+def missing(record: Record, readings: Readings) -> list[InputError]:
+    """What must still be answered before there is a beam to solve, each with its field."""
+    wanted: list[tuple[str, str]] = []
+    for i, support in enumerate(record["supports"]):
+        if support["kind"] is None:
+            wanted.append((f"/supports/{i}/kind", f"The kind of support {support['name']}"))
+        if support["kind"] == "spring" and support["stiffness"] is None:
+            wanted.append((f"/supports/{i}/stiffness", f"The spring stiffness of support {support['name']}"))
+    for i, span in enumerate(record["spans"]):
+        name = span_name(record, i)
+        if span["length"] is None:
+            wanted.append((f"/spans/{i}/length", f"The length of span {name}"))
+        elif span["measure"] is None:
+            wanted.append((f"/spans/{i}/measure", f"Whether span {name} was measured clear or centre to centre"))
+        for j in (i, i + 1):
+            if span["measure"] == "clear" and record["supports"][j]["bearing"] is None \
+                    and record["supports"][j]["kind"] != "free":
+                wanted.append((f"/supports/{j}/bearing", f"The bearing length of support {record['supports'][j]['name']}"))
+    for i, load in enumerate(record["loads"]):
+        wanted += [(f"/loads/{i}/{f}", text) for f, text in _load_gaps(load)]
+    for i, hinge in enumerate(record["hinges"]):
+        if _position_gap(hinge["position"]):
+            wanted.append((f"/hinges/{i}/position", "The place of the hinge"))
+    unread = {error.field for error in readings.errors}
+    return [InputError(code="missing", field=field, message=f"{text} is not entered yet.")
+            for field, text in dict(wanted).items() if field not in unread]
+
+
+def span_name(record: Record, i: int) -> str:
+    """A–B: the span between two supports by their names."""
+    return f"{record['supports'][i]['name']}–{record['supports'][i + 1]['name']}"
+
+
+def load_name(load: dict[str, Any]) -> str:
+    return load["name"].strip() or "the load"
+
+
+def _load_gaps(load: dict[str, Any]) -> list[tuple[str, str]]:
+    name = load_name(load)
+    gaps = []
+    if load["form"] is None:
+        gaps.append(("form", f"Whether {name} is a point load, a line load or a moment"))
+    if load["magnitude"] is None:
+        gaps.append(("magnitude", f"How much {name} is"))
+    if load["form"] == "line" and load["whole_beam"]:
+        return gaps
+    if load["form"] == "line" and load["length"] is None:
+        gaps.append(("length", f"Over what length {name} lies"))
+    if _position_gap(load["position"]):
+        gaps.append(("position", f"Where {name} is"))
+    return gaps
+
+
+def _position_gap(position: dict[str, Any] | None) -> bool:
+    if position is None or position["from"] is None or position["distance"] is None:
+        return True
+    return position["from"] == "support" and (position["support"] is None or position["side"] is None)
+
+
+def lay_out(record: Record, readings: Readings, pick: Pick, reading: Reading) -> Layout:
+    """The beam and its loads. Raises InputError with the field of the record when they cannot stand as entered."""
+    frame = _Frame(record, readings, pick, reading)
+    beam = _in_record(record, lambda: Beam(length=frame.length, supports=frame.beam_supports(),
+                                           stretches=_stretches(record, readings, pick, frame),
+                                           hinges=tuple(frame.place(h["position"], f"/hinges/{i}/position", 0.0)[0]
+                                                        for i, h in enumerate(record["hinges"]))))
+    loads = tuple(_loads(record, readings, pick, frame))
+    return Layout(beam=beam, loads=loads, supports=tuple(frame.x), real=frame.real, faces=tuple(frame.faces),
+                  spans=tuple(pairwise(frame.x)), zones=_zones(record, readings, frame),
+                  drawn={i: readings.issued[f"/spans/{i}/drawn"] for i in range(len(record["spans"]))
+                         if f"/spans/{i}/drawn" in readings.issued})
+
+
+def _zones(record: Record, readings: Readings, frame: "_Frame") -> dict[str, tuple[float, float]]:
+    """Where the zones of limits lie on this layout: distances on the member, never stretched with the span (J7)."""
+    made = {}
+    for i, sheet in enumerate(record["limits"]):
+        for j, entry in enumerate(sheet["entries"]):
+            path = f"/limits/{i}/entries/{j}/zone"
+            if zone_complete(entry["zone"], path, readings):
+                made[path] = frame.place(entry["zone"]["position"], f"{path}/position", readings.issued[f"{path}/length"])
+    return made
+
+
+def zone_complete(zone: dict[str, Any] | None, path: str, readings: Readings) -> bool:
+    """Whether a zone of a limit says from where and how far it runs."""
+    if zone is None or _position_gap(zone["position"]):
+        return False
+    return f"{path}/length" in readings.issued and f"{path}/position/distance" in readings.issued
+
+
+class _Frame:
+    """Where supports, faces and ends are, worked out from the left."""
+
+    def __init__(self, record: Record, readings: Readings, pick: Pick, reading: Reading) -> None:
+        self.record, self.pick, self.reading, self.readings = record, pick, reading, readings
+        count = len(record["supports"])
+        self.bearing = [self._bearing(j) for j in range(count)]
+        self.left = self._or_zero("/overhangs/left")
+        self.right = self._or_zero("/overhangs/right")
+        middle = [self.left]
+        for i, span in enumerate(record["spans"]):
+            length = pick(f"/spans/{i}/length")
+            clear = span["measure"] == "clear"
+            middle.append(middle[-1] + length + (self._half(i) + self._half(i + 1) if clear else 0.0))
+        self.x = middle
+        self.length = middle[-1] + self.right
+        self.faces = [(x - self._half(j), x + self._half(j)) for j, x in enumerate(middle)]
+        self.real = tuple(j for j, s in enumerate(record["supports"]) if s["kind"] != "free")
+        self.x = [self._reacting(j) for j in range(count)]
+
+    def _or_zero(self, path: str) -> float:
+        try:
+            return self.pick(path)
+        except KeyError:
+            return 0.0
+
+    def _bearing(self, j: int) -> float:
+        found = self._or_zero(f"/supports/{j}/bearing")
+        return max(found, self.readings.issued.get(f"/supports/{j}/bearing_drawn", 0.0)) if found else 0.0
+
+    def _half(self, j: int) -> float:
+        """From the reaction to the inner face. An end support under the effective rule reacts at most depth/2 inside."""
+        half = self.bearing[j] / 2
+        at_end = (j == 0 and not self.left) or (j == len(self.bearing) - 1 and not self.right)
+        if at_end and self.reading.rule == "effective":
+            half = min(half, (self._or_zero("/section/depth") or self.bearing[j]) / 2)
+        return half
+
+    def _reacting(self, j: int) -> float:
+        x, half = self.x[j], self._half(j)
+        if not self.reading.edges or not (self.left or self.right) or not self.bearing[j]:
+            return x
+        if j == 0:
+            return x - half if self.left else x + half
+        if j == len(self.bearing) - 1:
+            return x + half if self.right else x - half
+        return x
+
+    def beam_supports(self) -> tuple[Support, ...]:
+        made = []
+        for j in self.real:
+            support = self.record["supports"][j]
+            springs = {name: self.pick(f"/supports/{j}/{name}") for name in ("stiffness", "rotational")
+                       if support[name] is not None and (name == "rotational" or support["kind"] == "spring")}
+            made.append(_in_support(j, lambda: Support(x=self.x[j], kind=support["kind"],
+                                                       settlement=self._or_zero(f"/supports/{j}/settlement"), **springs)))
+        return tuple(made)
+
+    def place(self, position: dict[str, Any], path: str, width: float) -> tuple[float, float]:
+        """(start, end) in m of a thing `width` long that stands at a position."""
+        distance = self._distance(f"{path}/distance")
+        origin, way = self._origin(position)
+        near = origin + way * distance if position["to"] == "near_edge" else origin + way * (distance - width / 2)
+        far = near + way * width
+        return min(near, far), max(near, far)
+
+    def onto_beam(self, start: float, end: float, path: str) -> tuple[float, float]:
+        """A load that sticks out by no more than a tape may be out (or, in the search, by any amount) is moved onto the
+        beam whole: none of it is lost."""
+        over = max(-start, end - self.length)
+        if self.reading.strict and over > STICKS_OUT:
+            where = f"from {start:.3f} m to {end:.3f} m" if end > start else f"at {start:.3f} m"
+            raise InputError(code="off_the_beam", field=f"{path}/position",
+                             message=f"The load lies {where}, but the beam runs from 0 to {self.length:.3f} m. "
+                                     "Measure again from the point named, or correct the span.")
+        width = min(end - start, self.length)
+        start = min(max(start, 0.0), self.length - width)
+        return start, start + width
+
+    def _distance(self, path: str) -> float:
+        issued = self.readings.issued
+        return issued[path] if path in issued else self.pick(path)
+
+    def _origin(self, position: dict[str, Any]) -> tuple[float, float]:
+        if position["from"] == "left_end":
+            return 0.0, 1.0
+        if position["from"] == "right_end":
+            return self.length, -1.0
+        way = 1.0 if position["side"] == "right" else -1.0
+        j = min(position["support"], len(self.x) - 1)
+        if position["at"] == "face":
+            return self.faces[j][1 if way > 0 else 0], way
+        return 0.5 * sum(self.faces[j]), way
+
+
+def _in_record(record: Record, make: Callable[[], Any]) -> Any:
+    try:
+        return make()
+    except InputError as error:
+        raise error.moved("/" + error.field.lstrip("/")) from None
+
+
+def _in_support(j: int, make: Callable[[], Support]) -> Support:
+    try:
+        return make()
+    except InputError as error:
+        raise error.moved(f"/supports/{j}/{error.field}") from None
+
+
+def _stretches(record: Record, readings: Readings, pick: Pick, frame: _Frame) -> tuple[Stretch, ...]:
+    """The base stiffness, cut by the zones that have another."""
+    base = pick("/section/stiffness") if record["section"]["stiffness"] is not None else ANY_STIFFNESS
+    zones = []
+    for i, zone in enumerate(record["section"]["zones"]):
+        path = f"/section/zones/{i}"
+        if zone["length"] is None or zone["stiffness"] is None or _position_gap(zone["position"]):
+            raise InputError(code="missing", field=path, message="This stretch of other stiffness is not entered in full.")
+        start, end = frame.place(zone["position"], f"{path}/position", readings.issued[f"{path}/length"])
+        zones.append((max(start, 0.0), min(end, frame.length), pick(f"{path}/stiffness"), path))
+    made, at = [], 0.0
+    for start, end, stiffness, path in sorted(zones):
+        if start < at - 1e-9 or end <= start:
+            raise InputError(code="stretches", field=path, message="This stretch overlaps another or lies off the beam.")
+        if start > at + 1e-3:
+            made.append(Stretch(start=at, end=start, bending_stiffness=base))
+        made.append(Stretch(start=made[-1].end if made else 0.0, end=end, bending_stiffness=stiffness))
+        at = end
+    if at < frame.length - 1e-3 or not made:
+        made.append(Stretch(start=at, end=frame.length, bending_stiffness=base))
+    last = made[-1]
+    made[-1] = Stretch(start=last.start, end=frame.length, bending_stiffness=last.bending_stiffness)
+    return tuple(made)
+
+
+def _loads(record: Record, readings: Readings, pick: Pick, frame: _Frame) -> list[Load]:
+    """Loads at their best estimate; how far each source may be out is applied as a factor on the response."""
+    best = {path: m.best for path, m in readings.measured.items()}
+    made: list[Load] = []
+    if record["self_weight"]["answer"] == "entered" and "/self_weight/mass" in best:
+        w = best["/self_weight/mass"]
+        made.append(LineLoad(start=0.0, end=frame.length, start_intensity=w, end_intensity=w, source=SELF_WEIGHT))
+    for i, load in enumerate(record["loads"]):
+        path = f"/loads/{i}"
+        try:
+            made.append(_one_load(load, path, best, pick, frame))
+        except InputError as error:
+            raise error.moved(f"{path}/{error.field}" if not error.field.startswith("/") else error.field) from None
+    return made
+
+
+def source_of(load: dict[str, Any]) -> str:
+    """The unknown that a load belongs to: what the person named as its source, or itself."""
+    return load["source"].strip() or load["id"]
+
+
+def _one_load(load: dict[str, Any], path: str, best: dict[str, float], pick: Pick, frame: _Frame) -> Load:
+    amount, source = best[f"{path}/magnitude"], source_of(load)
+    if load["form"] == "line":
+        far = best.get(f"{path}/magnitude_end", amount)
+        if load["whole_beam"]:
+            start, end = 0.0, frame.length
+        else:
+            start, end = frame.place(load["position"], f"{path}/position", pick(f"{path}/length"))
+            start, end = frame.onto_beam(start, end, path)
+        return LineLoad(start=start, end=end, start_intensity=amount, end_intensity=far, source=source)
+    x = frame.place(load["position"], f"{path}/position", 0.0)[0]
+    x = frame.onto_beam(x, x, path)[0]
+    if load["form"] == "moment":
+        return AppliedMoment(x=x, moment=amount, source=source)
+    return PointLoad(x=x, force=amount, source=source)
