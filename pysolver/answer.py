@@ -6,18 +6,18 @@ precision for comparing two runs of the same record.
 
 import math
 import platform
-from dataclasses import replace
+from collections.abc import Sequence
+from dataclasses import asdict, replace
 from typing import Any
 
 import numpy as np
 
 from pysolver import __version__
 from pysolver.check import Result
-from pysolver.comparison import factor_ranges
 from pysolver.display import System, show, show_beside, show_range, show_ratio
-from pysolver.envelope import worst_polynomials
 from pysolver.facts import distressed
-from pysolver.governing import Governed, least_reaction
+from pysolver.figures import drawings
+from pysolver.governing import least_reaction
 from pysolver.limits import name_of_sheet
 from pysolver.model import span_rule
 from pysolver.outcome import CLEAR, Compared, lapsed, ruled_out, state, valid_until, what_now
@@ -37,9 +37,11 @@ def versions() -> dict[str, str]:
 def answer(result: Result, now: str | None = None) -> dict[str, Any]:
     """The whole result for showing. now: ISO time with zone, for validity (J26)."""
     system: System = result.record["settings"]["display"]
+    drawn, picks = drawings(result, system)
     return {
+        "drawings": drawn, "picks": [asdict(pick) for pick in picks],
         "readings": readings(result, system), "errors": [_error(e) for e in result.errors],
-        "outcome": outcome(result, system, now), "criteria": [criterion(result, c, system) for c in result.compared],
+        "outcome": outcome(result, system, now), "criteria": [criterion(result, c, system) for c in by_weight(result.compared)],
         "reactions": reactions(result, system), "compared": _compared_names(result), "not_compared": not_compared(result),
         "notes": notes(result, system), "cautions": words()["cautions"], "decisions": decisions(result),
         "clear_area": clear_area(result), "equilibrium": equilibrium(result), "numbers": numbers(result),
@@ -80,7 +82,7 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
 
 
 def _decision_label(choice: str) -> str:
-    return next(d["label"].lower() for d in words()["decisions"] if d["id"] == choice)
+    return next(str(d["label"]).lower() for d in words()["decisions"] if d["id"] == choice)
 
 
 def bar_numbers(leading: Compared | None) -> str:
@@ -91,6 +93,11 @@ def bar_numbers(leading: Compared | None) -> str:
     if leading.high is not None and leading.low is not None:
         text += f", range {show_ratio(leading.low)} to {show_ratio(leading.high)}"
     return text
+
+
+def by_weight(compared: Sequence[Compared]) -> list[Compared]:
+    """Strength before sag, the nearest to its limit first."""
+    return sorted(compared, key=lambda c: (c.kind == "sag", -max(c.high or 0.0, c.ratio or 0.0)))
 
 
 def criterion(result: Result, one: Compared, system: System) -> dict[str, Any]:
@@ -247,27 +254,3 @@ def numbers(result: Result) -> dict[str, float]:
 
 def _sag_known(result: Result) -> bool:
     return "/section/stiffness" in result.readings.measured
-
-
-def envelope_pieces(governed: Governed, result: Result, kind: str) -> list[tuple[float, float, Any]]:
-    """(x0, x1, coefficients) of the worst effect along the beam in the case that governs a kind, for drawing."""
-    assert result.model is not None
-    for position, one in enumerate(result.model.judged):
-        if one.criterion.kind == kind:
-            break
-    else:
-        return []
-    name = "shear" if kind == "shear" else "sag" if kind == "sag" else "moment"
-    sign = -1.0 if kind == "hogging" else 1.0
-    influence = governed.best.influence(name)
-    low, high = factor_ranges(one, result.model.sources, best=False)
-    case = [c.name for c in one.cases].index(result.compared[position].case)
-    pieces = worst_polynomials(influence, sign, low[case], high[case])[0]
-    x = governed.best.batch.x[0]
-    told = []
-    for p in range(pieces.shape[0]):
-        for q in range(pieces.shape[1]):
-            s0, s1 = float(influence.ends[0, p, q]), float(influence.ends[0, p, q + 1])
-            if s1 > s0:
-                told.append((float(x[p]) + s0, float(x[p]) + s1, (float(x[p]), pieces[p, q])))
-    return told

@@ -6,6 +6,7 @@ what cannot be built raises InputError with the field and what to do.
 
 import math
 from dataclasses import dataclass
+from itertools import pairwise
 from typing import Literal, get_args
 
 from pysolver.errors import InputError
@@ -108,7 +109,7 @@ class Beam:
                              message=f"{len(self.supports)} supports are more than {MAX_SPANS + 1}. Split the beam.")
         for i, support in enumerate(self.supports):
             within(support.x, 0.0, self.length, f"supports/{i}", "A support")
-        for i, (a, b) in enumerate(zip(self.supports, self.supports[1:])):
+        for i, (a, b) in enumerate(pairwise(self.supports)):
             if b.x - a.x < SHORTEST:
                 raise InputError(code="span", field=f"spans/{i}",
                                  message=f"The span between two supports is {b.x - a.x:g} m. It must be more than zero, "
@@ -134,7 +135,7 @@ class Beam:
 
     def _check_stretches(self) -> None:
         edges = [s.start for s in self.stretches[:1]] + [s.end for s in self.stretches]
-        gaps = any(abs(b.start - a.end) > 1e-9 for a, b in zip(self.stretches, self.stretches[1:]))
+        gaps = any(abs(b.start - a.end) > 1e-9 for a, b in pairwise(self.stretches))
         if not edges or gaps or abs(edges[0]) > 1e-9 or abs(edges[-1] - self.length) > 1e-9:
             raise InputError(code="stretches", field="stiffness",
                              message="The stiffness EI must be given once for every part of the beam, without gap or overlap.")

@@ -21,7 +21,7 @@ UNREADABLE, DIFFERS, OUR_FAULT = 6, 7, 70
 MAX_FILE = 4_000_000  # bytes
 
 
-class _Failure(Exception):
+class _CommandError(Exception):
     """Ends a command with a message on standard error and an exit code."""
 
     def __init__(self, message: str, code: int) -> None:
@@ -35,7 +35,7 @@ def main(arguments: Sequence[str] | None = None) -> int:
     run: Callable[[argparse.Namespace], int] = chosen.run
     try:
         return run(chosen)
-    except _Failure as failure:
+    except _CommandError as failure:
         print(f"asfound: {failure}", file=sys.stderr)
         return failure.code
 
@@ -69,20 +69,20 @@ def _ask(request: dict[str, Any]) -> dict[str, Any]:
         return result
     error = told["error"]
     where = f" [{error['field']}]" if error["field"] else ""
-    raise _Failure(f"{error['message']}{where}", UNREADABLE if error["kind"] == "input" else OUR_FAULT)
+    raise _CommandError(f"{error['message']}{where}", UNREADABLE if error["kind"] == "input" else OUR_FAULT)
 
 
 def _record(path: str) -> Any:
     try:
         raw = sys.stdin.buffer.read(MAX_FILE + 1) if path == "-" else Path(path).read_bytes()[:MAX_FILE + 1]
     except OSError as error:
-        raise _Failure(f"cannot read {path}: {error.strerror}. Name a record file.", UNREADABLE) from None
+        raise _CommandError(f"cannot read {path}: {error.strerror}. Name a record file.", UNREADABLE) from None
     if len(raw) > MAX_FILE:
-        raise _Failure(f"{path} is larger than {MAX_FILE} bytes, which no record is.", UNREADABLE)
+        raise _CommandError(f"{path} is larger than {MAX_FILE} bytes, which no record is.", UNREADABLE)
     try:
         document = json.loads(raw)
     except ValueError as error:
-        raise _Failure(f"{path} is not JSON: {error}. Export the record again.", UNREADABLE) from None
+        raise _CommandError(f"{path} is not JSON: {error}. Export the record again.", UNREADABLE) from None
     return document["record"] if isinstance(document, dict) and "record" in document else document
 
 

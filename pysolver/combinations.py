@@ -105,10 +105,13 @@ def _leading(data: dict[str, Any], sources: Sequence[Source]) -> list[Case]:
         leads = s.category == leader or s.category is None  # not known: always the largest factor (J17)
         return 0.0, whole if leads else accompanying(s.category)
 
-    names = [(c, f"{sup:g} permanent + {whole:g} {c} leading" + (", others accompanying" if len(categories) > 1 else ""))
-             for c in categories] or [(None, f"{sup:g} permanent" + (f" + {whole:g} variable" if any(
-                 s.category is None for s in sources) else ""))]
-    return [_case(name, [pair(s, c) for s in sources]) for c, name in names]
+    def name(leader: str | None) -> str:
+        if leader is None:
+            return f"{sup:g} permanent + {whole:g} variable"
+        return f"{sup:g} permanent + {whole:g} {leader} leading" + (", others accompanying" if len(categories) > 1 else "")
+
+    leaders: list[str | None] = [*categories] or [None]
+    return [_case(name(c), [pair(s, c) for s in sources]) for c in leaders]
 
 
 def _listed(data: dict[str, Any], sources: Sequence[Source]) -> list[Case]:

@@ -159,4 +159,4 @@ def smallest_reactions(along: Along, chosen: Sequence[Case], sources: Sequence[S
 def chunks(total: int, along_one: Along) -> int:
     """How many layouts to solve at once so that the arrays of one quantity stay small."""
     _, pieces, sources, _ = along_one.batch.sag.shape
-    return max(1, min(total, CELLS_AT_ONCE // max(1, pieces * pieces * sources)))
+    return max(1, min(total, CELLS_AT_ONCE // max(1, int(pieces * pieces * sources))))

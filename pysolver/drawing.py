@@ -1,4 +1,4 @@
-"""The drawings of one check, as SVG markup: the working drawing, the free body, and the curves of shear, moment and sag.
+"""How is a check drawn? As SVG markup: the working drawing, the free body, the curves of shear, moment and sag.
 
 Surveyor's field book, ink on paper: a ruled base line, ordinates under the curve, limits as rails that the curve must
 stay between, dimension lines with oblique strokes, hatching under supports. Classes only; the page inks them.

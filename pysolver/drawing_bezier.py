@@ -1,13 +1,14 @@
 """How does a polynomial of the beam become a curve of the drawing? One cubic Bézier for each piece, exactly.
 
-A cubic Bézier whose control points stand at thirds of the piece is the graph of a cubic polynomial; its ordinates are the
-polynomial's Bernstein coefficients b_i = sum over k <= i of C(i,k)/C(3,k) a_k h^k (Farin, Curves and Surfaces for CAGD,
-chapter "Bernstein form"; from memory). So shear (degree 2) and moment (degree 3) are drawn without any error.
+A cubic Bézier whose control points stand at thirds of the piece is the graph of a cubic polynomial; its ordinates are
+the polynomial's Bernstein coefficients b_i = sum over k <= i of C(i,k)/C(3,k) a_k h^k (Farin, Curves and Surfaces for
+CAGD, on the Bernstein form; from memory). So shear (degree 2) and moment (degree 3) are drawn without any error.
 
 A quintic (sag) is no cubic. It is cut into n equal parts, each replaced by the cubic that has its values and slopes at
-both ends (Hermite). The error of that cubic is at most h^4/384 max |p''''| (e.g. Stoer and Bulirsch, Introduction to
-Numerical Analysis, on Hermite interpolation; from memory). p'''' = 24 a4 + 120 a5 s runs straight, so its maximum stands
-at an end of the piece, and n = ceil(h (max |p''''| / (384 tolerance))^(1/4)) parts keep the error below the tolerance.
+both ends (Hermite). The error of that cubic is at most h^4/384 max |p''''| (Stoer and Bulirsch, Introduction to
+Numerical Analysis, on Hermite interpolation; from memory). p'''' = 24 a4 + 120 a5 s runs straight, so its maximum
+stands at an end of the piece, and n = ceil(h (max |p''''| / (384 tolerance))^(1/4)) parts keep the error below the
+tolerance.
 """
 
 import math
@@ -20,6 +21,8 @@ from pysolver.piecewise import Floats
 from pysolver.svg import num
 
 TOLERANCE = 0.045  # drawing units; with coordinates rounded to 0.001 the sag stays within 0.05
+
+MOST_PARTS = 400  # of one piece: more parts than the paper is wide show nothing more
 
 Curve = tuple[float, float, tuple[float, float, float, float]]  # start, end, ordinates of the four control points
 Scale = Callable[[float], float]
@@ -54,13 +57,13 @@ def parts(coefficients: Floats, length: float, tolerance: float) -> int:
     for _ in range(3):
         fourth = piecewise.derivative(fourth)
     largest = float(np.abs(piecewise.evaluate(fourth, np.array([0.0, length]))).max())
-    return min(max(1, math.ceil(length * (largest / (384 * tolerance)) ** 0.25)), 400)
+    return min(max(1, math.ceil(length * math.sqrt(math.sqrt(largest / (384 * tolerance))))), MOST_PARTS)
 
 
 def path_data(pieces: Sequence[Curve], x: Scale, y: Scale, *, base: float | None = None) -> str:
     """SVG path data through all pieces in order: jumps become verticals; a gap starts anew.
 
-    base: also closed to this ordinate (drawing units) at both ends, for a wash or for a line that starts at the base line.
+    base: also closed to this ordinate (drawing units) at both ends, for a wash or a line that starts at the base line.
     """
     d: list[str] = []
     last: float | None = None

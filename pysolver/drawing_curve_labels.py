@@ -1,18 +1,20 @@
 """Which values are written on a curve, and where, so that they can be read?
 
-Written: the governing places, the rails, then the extremes of every span and overhang, largest first. A value that finds
-no room is counted and the drawing says how many are left out; nothing is written over another text.
+Written: the governing places, the rails, then the extremes of every span and overhang, largest first. A value that
+finds no room is counted and the drawing says how many are left out; nothing is written over another text.
 """
 
+import math
 from collections.abc import Iterator, Sequence
 from dataclasses import dataclass
+from itertools import pairwise
 
 import numpy as np
 
 from pysolver import piecewise, svg
 from pysolver.display import System, show
 from pysolver.drawing_body import WIDTH, TrueScale
-from pysolver.drawing_labels import Box, Place, Sheet, width_of
+from pysolver.drawing_labels import Box, Place, Sheet, rows, width_of
 from pysolver.drawing_symbols import name
 from pysolver.found import Layout
 from pysolver.piecewise import Floats
@@ -20,6 +22,11 @@ from pysolver.piecewise import Floats
 WORTH = 0.02  # of the largest value: less is not written
 Piece = tuple[float, float, Floats]
 Value = tuple[float, float, str]  # x, value, text
+Limit = tuple[float, float, float, str]  # start, end, value with its sign, text
+RING = 10.0  # half of the mark at a governing place
+NAME_ROW = 23.0
+LONGEST = 46  # characters that fit across the paper
+MOST_COVERED = 2  # small boxes of a line: a value may touch the end of a stroke, and never lies along or across a curve
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -48,46 +55,64 @@ class Figure:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Labels:
+    """markup; how many values found no room; which governing places and limits found none; the extremes in words."""
+
     markup: str
     left_out: int
+    homeless: tuple[str, ...]
     words: str
 
 
 def base_line(figure: Figure, layout: Layout, names: Sequence[str]) -> str:
-    """The ruled line of the beam with its supports: a small triangle under it, a name at the foot."""
-    parts = [svg.line(figure.x(0.0) - 6, figure.base, figure.x(layout.beam.length) + 6, figure.base, "axis", stroke_width="1.2")]
-    last = -100.0
-    for j in layout.real:
-        x, y = figure.x(layout.supports[j]), figure.base
-        parts.append(svg.polyline([(x, y), (x - 5, y + 8), (x + 5, y + 8)], "support", closed=True, stroke_width="1.2"))
-        if x - last >= 22:
-            parts.append(name(x, figure.bottom + 12, svg.clean(names[j])))
-            last = x
+    """The ruled line of the beam, its supports under it (a hatched face where the beam is fixed), names at the foot."""
+    y = figure.base
+    parts = [svg.line(figure.x(0.0) - 6, y, figure.x(layout.beam.length) + 6, y, "axis", stroke_width="1.2")]
+    xs = [figure.x(layout.supports[j]) for j in layout.real]
+    for j, x, support, row in zip(layout.real, xs, layout.beam.supports, name_rows(xs), strict=True):
+        foot = figure.bottom + 12 + NAME_ROW * row
+        parts.append(svg.line(x, y, x, foot - 11, "dim", stroke_width="0.4", stroke_dasharray="1 3"))
+        parts.append(_foot_mark(x, y, support.kind == "fixed", -8.0 if x < WIDTH / 2 else 0.0))
+        parts.append(name(x, foot, svg.clean(names[j], 4)))
     return "".join(parts)
 
 
-def label_values(figure: Figure, layout: Layout, pieces: Sequence[Piece], edges: Sequence[Piece],
-                 rails: Sequence[tuple[float, float, float, str]], governing: Sequence[Value]) -> Labels:
-    """All texts in the plot. edges: pieces of the worst case; rails: (start, end, signed value, text)."""
+def name_rows(xs: Sequence[float]) -> list[int]:
+    """In which row each name stands so that their circles stay apart."""
+    return rows([(x - 11.5, x + 11.5) for x in xs])
+
+
+def _foot_mark(x: float, y: float, fixed: bool, left: float) -> str:
+    if fixed:
+        return svg.hatched(x + left, y - 9, 8, 18, 4) + svg.line(x, y - 9, x, y + 9, "ground", stroke_width="1.6")
+    return svg.polyline([(x, y), (x - 5, y + 8), (x + 5, y + 8)], "support", closed=True, stroke_width="1.2")
+
+
+def label_values(figure: Figure, layout: Layout, pieces: Sequence[Piece], edges: Sequence[Sequence[Piece]],
+                 rails: Sequence[Limit], governing: Sequence[Value], floor: float) -> Labels:
+    """All texts in the plot. edges: curves of the worst case; floor: magnitudes up to it are rounding residues."""
     sheet = Sheet(frame=Box(x0=1, y0=figure.top - 6, x1=WIDTH - 1, y1=figure.bottom + 1))
-    sheet.soft += [*_lines(figure, pieces), *_lines(figure, edges), *_rail_boxes(figure, rails),
-                   Box(x0=0, x1=WIDTH, y0=figure.base - 1, y1=figure.base + 9)]
-    written = [sheet.write(text, list(_around(figure, x, value, text)), "label gov") for x, value, text in governing]
-    written += [sheet.write(text, list(_beside(figure, start, end, value, text)), "rail-label", svg.SMALL)
-                for start, end, value, text in dict.fromkeys(rails)]
-    values = extremes(layout, pieces)
-    for x, value in values:
-        written.append(sheet.write(figure.shown(value), list(_around(figure, x, value, figure.shown(value)))))
-    words = "; ".join(f"{show(figure.dimension, v, figure.system)} at {show('length', x, figure.system)}" for x, v in values)
-    return Labels(markup="".join(one for one in written if one), left_out=sum(one is None for one in written),
-                  words=f"Extremes: {words or 'none'}.")
+    sheet.soft += [*_lines(figure, pieces), *(box for edge in edges for box in _lines(figure, edge)),
+                   *_rail_boxes(figure, rails), Box(x0=0, x1=WIDTH, y0=figure.base - 1, y1=figure.base + 9)]
+    sheet.hard += [Box(x0=x - RING, x1=x + RING, y0=y - RING, y1=y + RING)
+                   for x, y in ((figure.x(place), figure.y(value)) for place, value, _ in governing)]
+    must = [(text, sheet.write(text, list(_around(figure, x, value, text, RING)), "label gov"))
+            for x, value, text in ((x, value, svg.clean(text, LONGEST)) for x, value, text in governing)]
+    must += [(text, sheet.write(text, list(_beside(figure, start, end, value, text)), "rail-label", svg.SMALL))
+             for start, end, value, text in ((a, b, value, svg.clean(text, LONGEST)) for a, b, value, text in rails)]
+    values = extremes(layout, pieces, floor)
+    may = [sheet.write(figure.shown(value), list(_around(figure, x, value, figure.shown(value))),
+                       most=MOST_COVERED if k else math.inf) for k, (x, value) in enumerate(values)]
+    words = "; ".join(f"{show(figure.dimension, v, figure.system)} at {show('length', x, figure.system)}"
+                      for x, v in values)
+    return Labels(markup="".join(one for one in (*(m for _, m in must), *may) if one), left_out=may.count(None),
+                  homeless=tuple(text for text, one in must if one is None), words=f"Extremes: {words or 'none'}.")
 
 
-def extremes(layout: Layout, pieces: Sequence[Piece]) -> list[tuple[float, float]]:
+def extremes(layout: Layout, pieces: Sequence[Piece], floor: float) -> list[tuple[float, float]]:
     """(x, value) of the largest and smallest value of every span and overhang, largest magnitude first."""
     bounds = sorted({0.0, *(layout.supports[j] for j in layout.real), layout.beam.length})
     found: list[tuple[float, float]] = []
-    for a, b in zip(bounds, bounds[1:], strict=False):
+    for a, b in pairwise(bounds):
         here = [p for p in pieces if a - 1e-9 <= 0.5 * (p[0] + p[1]) <= b + 1e-9]
         values = [one for piece in here for one in _candidates(piece)]
         if values:
@@ -96,7 +121,7 @@ def extremes(layout: Layout, pieces: Sequence[Piece]) -> list[tuple[float, float
     kept: list[tuple[float, float]] = []
     for x, v in sorted(found, key=lambda one: -abs(one[1])):
         twice = any(abs(x - a) < 1e-6 and abs(v - b) < 1e-6 * most for a, b in kept)
-        if abs(v) > max(WORTH * most, 1e-9) and not twice:
+        if abs(v) > max(WORTH * most, floor) and not twice:
             kept.append((x, v))
     return kept
 
@@ -108,23 +133,24 @@ def _candidates(piece: Piece) -> Iterator[tuple[float, float]]:
         yield start + s, float(piecewise.evaluate(c, np.asarray(s)))
 
 
-def _around(figure: Figure, x: float, value: float, words: str) -> Iterator[Place]:
-    """Places for a value: outside the curve first, then beside it, then farther out, then inside, then upwards."""
+def _around(figure: Figure, x: float, value: float, words: str, clear: float = 0.0) -> Iterator[Place]:
+    """Places for a value: outside the curve, beside it, farther out on a leader, then inside, then written upwards."""
     px, py = figure.x(x), figure.y(value)
     out = 1.0 if py >= figure.base else -1.0
     half = width_of(words) / 2
     middle = min(max(px, half + 4), WIDTH - half - 4)
+    shifts = (0.0, half + 5, -half - 5)
+    sides = ((6.0 + clear, "start"), (-6.0 - clear, "end"))
 
     def level(step: float) -> float:
-        return py + (14.0 + step if out > 0 else -(4.0 + step))
+        return py + (14.0 + clear + step if out > 0 else -(4.0 + clear + step))
 
-    for step in (0.0, 8.0, 16.0):
-        for shift in (0.0, half + 5, -half - 5):
-            yield Place(x=middle + shift, y=level(step))
-    for shift in (6.0, -6.0):
-        yield Place(x=px + shift, y=py + 4, anchor="start" if shift > 0 else "end")
-    for shift in (0.0, half + 5, -half - 5):
-        yield Place(x=middle + shift, y=py - out * 8 + (0 if out > 0 else 10))
+    yield from (Place(x=middle + shift, y=level(step)) for step in (0.0, 8.0) for shift in shifts)
+    yield from (Place(x=px + shift, y=py + 4, anchor=anchor) for shift, anchor in sides)
+    yield from (Place(x=middle + shift, y=level(step), to=(px, py + out * clear)) for step in (16.0, 26.0, 36.0)
+                for shift in shifts)
+    yield from (Place(x=px + shift, y=py + 4 - out * deep, anchor=anchor) for deep in (14.0, 28.0, 42.0)
+                for shift, anchor in sides)
     for back in (0.0, 14.0, 28.0):
         yield Place(x=px + 5, y=py + out * (6 - back), anchor="end" if out > 0 else "start", turned=True)
         yield Place(x=px + 5, y=py - out * (6 + back), anchor="start" if out > 0 else "end", turned=True)
@@ -142,16 +168,28 @@ def _beside(figure: Figure, start: float, end: float, value: float, words: str) 
 
 def _lines(figure: Figure, pieces: Sequence[Piece]) -> Iterator[Box]:
     """Small boxes along a curve, only to keep texts off it."""
+    last: float | None = None
     for start, end, c in pieces:
         count = max(2, int((figure.x(end) - figure.x(start)) / 4))
         s = np.linspace(0.0, end - start, count + 1)
         ys = [figure.y(float(v)) for v in piecewise.evaluate(c, s)]
         xs = [figure.x(start + float(one)) for one in s]
-        for (xa, ya), (xb, yb) in zip(zip(xs, ys, strict=True), list(zip(xs, ys, strict=True))[1:], strict=False):
+        yield from _jump(xs[0], figure.base if last is None else last, ys[0])
+        last = ys[-1]
+        for (xa, ya), (xb, yb) in pairwise(zip(xs, ys, strict=True)):
             yield Box(x0=xa - 0.5, x1=xb + 0.5, y0=min(ya, yb) - 1, y1=max(ya, yb) + 1)
+    if last is not None:
+        yield from _jump(figure.x(pieces[-1][1]), last, figure.base)
 
 
-def _rail_boxes(figure: Figure, rails: Sequence[tuple[float, float, float, str]]) -> Iterator[Box]:
+def _jump(x: float, start: float, end: float) -> Iterator[Box]:
+    """The vertical of a jump, in boxes of a few units so that crossing it counts by length."""
+    top, bottom = min(start, end), max(start, end)
+    for k in range(int((bottom - top) / 4)):
+        yield Box(x0=x - 1, x1=x + 1, y0=top + 4 * k, y1=top + 4 * k + 4)
+
+
+def _rail_boxes(figure: Figure, rails: Sequence[Limit]) -> Iterator[Box]:
     for start, end, value, _ in rails:
         y = figure.y(value)
         out = 5.0 if y >= figure.base else -5.0

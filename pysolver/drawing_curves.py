@@ -2,24 +2,23 @@
 
 True scale along the beam. The curve is drawn from the polynomials (drawing_bezier.py), jumps as verticals, with
 ordinates from the base line. Signs: shear that pushes the left part up is drawn above the line; a sagging moment and a
-sag are drawn below it (the side in tension), and the drawing says so. Sag is measured from the line through the supports
-as they stand after settling (comparison.from_chord).
-SI in, values shown with three figures.
+sag are drawn below it (the side in tension), and the drawing says so. Sag is measured from the line through the
+supports as they stand after settling (comparison.from_chord). SI in; values are shown with three figures.
 """
 
 from collections.abc import Sequence
 from dataclasses import dataclass
+from itertools import pairwise
 from typing import Literal
 
 import numpy as np
 
 from pysolver import drawing_bezier as bezier
-from pysolver import drawing_symbols as symbols
 from pysolver import piecewise, svg
 from pysolver.comparison import Along, from_chord
 from pysolver.display import System, show
 from pysolver.drawing_body import WIDTH, TrueScale
-from pysolver.drawing_curve_labels import Figure, base_line, label_values
+from pysolver.drawing_curve_labels import NAME_ROW, Figure, base_line, label_values, name_rows
 from pysolver.found import Layout
 from pysolver.piecewise import Floats
 from pysolver.record import SUPPORT_NAMES
@@ -31,6 +30,7 @@ Piece = tuple[float, float, Floats]  # start, end (m), coefficients ascending in
 TALL = 190.0  # of the plot
 HEADING = 46.0
 AIR = 22.0  # over and under the plot, for values and names
+RESIDUE = 1e-9
 FAR = 3.0  # a rail farther out than this many times the curve is named, not drawn
 DOWN = {"shear": -1.0, "moment": 1.0, "sag": 1.0}  # the way of positive values on the paper (y runs down)
 DIMENSION = {"shear": "force", "moment": "moment", "sag": "small_length"}
@@ -60,31 +60,45 @@ class Mark:
     label: str
 
 
-def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Sequence[Piece] | None, low: Sequence[Piece] | None,
-          rails: Sequence[Rail], governing: Sequence[Mark], system: System, names: Sequence[str] = SUPPORT_NAMES) -> str:
+def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Sequence[Piece] | None,
+          low: Sequence[Piece] | None, rails: Sequence[Rail], governing: Sequence[Mark], system: System,
+          names: Sequence[str] = SUPPORT_NAMES) -> str:
     """The curve of one quantity as SVG.
 
     response: unfactored best estimates. high, low: the largest and smallest values of the worst case (already from the
     chord, for sag). names: of the supports of the record, in order.
     """
     pieces = best_pieces(quantity, response, layout)
-    edges = [*(high or ()), *(low or ())]
-    reach = _reach([*pieces, *edges], governing)
+    edges = [sorted(one, key=lambda p: p[0]) for one in (high, low) if one]
+    floor = residue(quantity, response, layout)
+    reach = _reach([*pieces, *(p for edge in edges for p in edge)], governing, floor)
     near, far = _drawn_rails(rails, max(abs(r) for r in reach))
     figure = _figure(quantity, layout, reach, near, system)
-    body = [*_wash_and_ordinates(figure, pieces), *(_worst(figure, one) for one in (high, low) if one),
-            *(_rail(figure, one) for one in near), base_line(figure, layout, names),
-            svg.path(bezier.path_data(_curves(figure, pieces), figure.x, figure.y, base=figure.base), "curve", fill="none",
-                     stroke_width="2"), *(_ring(figure, one) for one in governing)]
-    flat = all(abs(r) < 1e-9 for r in _reach(pieces, ()))
     labels = label_values(figure, layout, pieces, edges, [(r.start, r.end, r.sign * r.value, r.label) for r in near],
-                          [(m.x, m.value, m.label) for m in governing])
-    notes = _notes(quantity, far, bool(edges), flat, labels.left_out)
-    foot = figure.bottom + 30.0
-    parts = [*_heading(quantity, figure.unit), *body, labels.markup,
-             *(svg.text(10, foot + 14 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL) for k, note in enumerate(notes))]
-    return svg.document(WIDTH, foot + 14 * len(notes) + 8, parts, name=quantity, title=f"{HEADINGS[quantity][0]} along the beam",
+                          [(m.x, m.value, m.label) for m in governing], floor)
+    flat = not any(_reach(pieces, (), floor))
+    notes = [*_notes(quantity, bool(edges), flat), *labels.homeless, *_beyond(far), *_left_out(labels.left_out)]
+    parts = [*_heading(quantity, figure.unit), *_wash_and_ordinates(figure, pieces),
+             *(_worst(figure, edge) for edge in edges), *(_rail(figure, one) for one in near),
+             base_line(figure, layout, names), _best(figure, pieces), *(_ring(figure, one) for one in governing),
+             labels.markup]
+    foot = figure.bottom + 30.0 + NAME_ROW * max(name_rows([figure.x(layout.supports[j]) for j in layout.real]))
+    parts += [svg.text(10, foot + 14 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL)
+              for k, note in enumerate(notes)]
+    return svg.document(WIDTH, foot + 14 * len(notes) + 8, parts, name=quantity,
+                        title=f"{HEADINGS[quantity][0]} along the beam",
                         description=f"{HEADINGS[quantity][1]}. {labels.words} {' '.join(r.label + '.' for r in rails)}")
+
+
+def residue(quantity: Quantity, response: Response, layout: Layout) -> float:
+    """Magnitudes up to this are rounding residues of the solver: not drawn as a curve, not written as a value.
+
+    Own rule: 1e-9 of the forces, for a moment times the length of the beam; a nanometre for sag.
+    """
+    length = layout.beam.length
+    forces = float(np.abs(response.reactions).sum() + np.abs(response.shear[:, 0]).max(initial=0.0)
+                   + np.abs(response.moment[:, 0]).max(initial=0.0) / length)
+    return {"shear": RESIDUE * forces, "moment": RESIDUE * forces * length, "sag": RESIDUE}[quantity]
 
 
 def best_pieces(quantity: Quantity, response: Response, layout: Layout) -> list[Piece]:
@@ -92,29 +106,32 @@ def best_pieces(quantity: Quantity, response: Response, layout: Layout) -> list[
     coefficients: Floats = getattr(response, quantity)
     if quantity == "sag":
         one = {name: getattr(response, name)[None, :, None, :] for name in ("shear", "moment", "slope", "sag")}
-        batch = Batch(sources=("all",), x=response.x[None, :], reactions=response.reactions[None, :, None],
-                      fixing_moments=response.fixing_moments[None, :, None], residual=np.array([response.residual]), **one)
+        batch = Batch(sources=("all",), x=response.x[None, :], residual=np.array([response.residual]),
+                      reactions=response.reactions[None, :, None],
+                      fixing_moments=response.fixing_moments[None, :, None], **one)
         coefficients = from_chord(Along(batch=batch, layouts=[layout]))[0, :, 0, :]
-    return [(float(a), float(b), c) for a, b, c in zip(response.x, response.x[1:], coefficients, strict=False) if b > a]
+    return [(float(a), float(b), c) for (a, b), c in zip(pairwise(response.x), coefficients, strict=True) if b > a]
 
 
-def _reach(pieces: Sequence[Piece], governing: Sequence[Mark]) -> tuple[float, float]:
-    """The smallest and largest value to be drawn, zero included; exact from ends and stationary points."""
+def _reach(pieces: Sequence[Piece], governing: Sequence[Mark], floor: float) -> tuple[float, float]:
+    """The smallest and largest value to be drawn, zero included; exact from ends and stationary points. Zeros when all
+    is below the floor."""
     values = [0.0, *(mark.value for mark in governing)]
     for start, end, c in pieces:
         inner = piecewise.stationary(c[None, :], np.array([end - start]))[0] if len(c) > 1 else np.zeros(0)
         places = np.array([0.0, end - start, *inner[~np.isnan(inner)]])
         values += [float(v) for v in piecewise.evaluate(c, places)]
-    return min(values), max(values)
+    return (min(values), max(values)) if max(abs(v) for v in values) > floor else (0.0, 0.0)
 
 
 def _drawn_rails(rails: Sequence[Rail], largest: float) -> tuple[list[Rail], list[Rail]]:
     """The rails to draw, and those too far out. Beside a curve of zeros only the nearest rails give a scale."""
-    limit = FAR * (largest if largest > 1e-9 else min((r.value for r in rails), default=1.0))
+    limit = FAR * (largest or min((r.value for r in rails), default=1.0))
     return [r for r in rails if r.value <= limit], [r for r in rails if r.value > limit]
 
 
-def _figure(quantity: Quantity, layout: Layout, reach: tuple[float, float], rails: Sequence[Rail], system: System) -> Figure:
+def _figure(quantity: Quantity, layout: Layout, reach: tuple[float, float], rails: Sequence[Rail],
+            system: System) -> Figure:
     values = [*reach, *(r.sign * r.value for r in rails)]
     span = [DOWN[quantity] * v for v in (min(values), max(values))]
     up, down = min(span), max(span)
@@ -151,10 +168,14 @@ def _wash_and_ordinates(figure: Figure, pieces: Sequence[Piece]) -> list[str]:
     return [wash, svg.path("".join(drawn), "ordinate", stroke_width="0.6")] if drawn else [wash]
 
 
+def _best(figure: Figure, pieces: Sequence[Piece]) -> str:
+    data = bezier.path_data(_curves(figure, pieces), figure.x, figure.y, base=figure.base)
+    return svg.path(data, "curve", fill="none", stroke_width="2", stroke_linejoin="round")
+
+
 def _worst(figure: Figure, pieces: Sequence[Piece]) -> str:
-    ordered = sorted(pieces, key=lambda p: p[0])
-    return svg.path(bezier.path_data(_curves(figure, ordered), figure.x, figure.y), "curve-high", fill="none",
-                    stroke_width="1.6", stroke_dasharray="7 4")
+    data = bezier.path_data(_curves(figure, pieces), figure.x, figure.y)
+    return svg.path(data, "curve-high", fill="none", stroke_width="1.6", stroke_dasharray="7 4")
 
 
 def _rail(figure: Figure, rail: Rail) -> str:
@@ -169,7 +190,7 @@ def _rail(figure: Figure, rail: Rail) -> str:
 
 def _ring(figure: Figure, mark: Mark) -> str:
     x, y = figure.x(mark.x), figure.y(mark.value)
-    return svg.circle(x, y, 5, "gov", stroke_width="2", fill="none") + svg.circle(x, y, 9, "gov", stroke_width="1", fill="none")
+    return "".join(svg.circle(x, y, radius, "gov", stroke_width="1.4", fill="none") for radius in (4, 8))
 
 
 def _heading(quantity: Quantity, unit: str) -> list[str]:
@@ -178,11 +199,15 @@ def _heading(quantity: Quantity, unit: str) -> list[str]:
             svg.text(10, 34, sign, "label-small", anchor="start", size=svg.SMALL)]
 
 
-def _notes(quantity: Quantity, far: Sequence[Rail], worst: bool, flat: bool, left_out: int) -> list[str]:
-    notes = ["full line: best estimate, unfactored" + ("; dashed: worst case" if worst else "")]
+def _notes(quantity: Quantity, worst: bool, flat: bool) -> list[str]:
     if flat:
-        notes = [f"{NAUGHT[quantity]} under these loads"]
-    notes += list(dict.fromkeys(f"{rail.label}, beyond this drawing" for rail in far))
-    if left_out:
-        notes.append(f"{left_out} more value{'s' if left_out > 1 else ''} had no room here")
-    return notes
+        return [f"{NAUGHT[quantity]} under these loads" + ("; dashed: worst case" if worst else "")]
+    return ["full line: best estimate, unfactored" + ("; dashed: worst case" if worst else "")]
+
+
+def _beyond(rails: Sequence[Rail]) -> list[str]:
+    return list(dict.fromkeys(f"{svg.clean(rail.label, 30)}, beyond this drawing" for rail in rails))
+
+
+def _left_out(count: int) -> list[str]:
+    return [f"{count} more value{'s' if count > 1 else ''} had no room here"] if count else []

@@ -4,6 +4,7 @@ Text is measured by count of characters (WIDE of the font size each, a little mo
 since no font is at hand where the drawings are made.
 """
 
+import math
 from collections.abc import Iterable, Sequence
 from dataclasses import dataclass, field
 
@@ -26,12 +27,13 @@ class Box:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Place:
-    """A place for a label: baseline point, anchor, and whether it is written upwards."""
+    """A place for a label: baseline point, anchor, whether it is written upwards; to: what a thin leader leads to."""
 
     x: float
     y: float
     anchor: str = "middle"
     turned: bool = False
+    to: svg.Point | None = None
 
 
 def width_of(words: str, size: float = svg.PLAIN) -> float:
@@ -57,8 +59,9 @@ class Sheet:
     hard: list[Box] = field(default_factory=list)
     soft: list[Box] = field(default_factory=list)
 
-    def room(self, words: str, places: Iterable[Place], size: float = svg.PLAIN) -> Place | None:
-        """The first place that covers nothing, else the first that covers the fewest lines, else None."""
+    def room(self, words: str, places: Iterable[Place], size: float = svg.PLAIN,
+             most: float = math.inf) -> Place | None:
+        """The first place that covers nothing, else the first that covers fewest lines (up to `most`), else None."""
         best: tuple[int, Place] | None = None
         for place in places:
             box = box_of(words, place, size)
@@ -67,21 +70,29 @@ class Sheet:
             covered = sum(box.meets(other) for other in self.soft)
             if covered == 0:
                 return place
-            if best is None or covered < best[0]:
+            if covered <= most and (best is None or covered < best[0]):
                 best = covered, place
         return best[1] if best else None
 
-    def write(self, words: str, places: Sequence[Place], classes: str = "label", size: float = svg.PLAIN) -> str | None:
+    def write(self, words: str, places: Sequence[Place], classes: str = "label", size: float = svg.PLAIN,
+              most: float = math.inf) -> str | None:
         """The label written at the best of the places, which is then taken; None when there is no room."""
-        place = self.room(words, places, size)
+        place = self.room(words, places, size, most)
         if place is None:
             return None
-        self.hard.append(box_of(words, place, size))
-        return svg.text(place.x, place.y, words, classes, anchor=place.anchor, size=size, turned=place.turned)
+        box = box_of(words, place, size)
+        self.hard.append(box)
+        written = svg.text(place.x, place.y, words, classes, anchor=place.anchor, size=size, turned=place.turned)
+        return written if place.to is None else _leader(box, place.to) + written
 
     def _inside(self, box: Box) -> bool:
         return (box.x0 >= self.frame.x0 and box.x1 <= self.frame.x1 and box.y0 >= self.frame.y0
                 and box.y1 <= self.frame.y1)
+
+
+def _leader(box: Box, to: svg.Point) -> str:
+    edge = box.y0 if abs(to[1] - box.y0) < abs(to[1] - box.y1) else box.y1
+    return svg.line(0.5 * (box.x0 + box.x1), edge, *to, "ordinate", stroke_width="0.6")
 
 
 def rows(extents: Sequence[tuple[float, float]]) -> list[int]:

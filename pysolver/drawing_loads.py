@@ -57,7 +57,8 @@ def draw_loads(loads: Sequence[DrawnLoad], top: float, width: float) -> LoadDraw
     """All loads above a beam whose upper side is at `top`, on paper `width` wide."""
     laid = _Rows(loads, width)
     most = max((abs(v) for one in loads if one.form == "line" for v in (one.start, one.end) if v), default=1.0)
-    labels = [Place(x=laid.label_x[i], y=top - laid.foot[laid.row[i]] - laid.size[laid.row[i]] - 5) for i in range(len(loads))]
+    labels = [Place(x=laid.label_x[i], y=top - laid.foot[laid.row[i]] - _rise_of(one, most) - 5)
+              for i, one in enumerate(loads)]
     boxes = [box_of(one.label, place) for one, place in zip(loads, labels, strict=True)]
     parts, centres = [], []
     for i, one in enumerate(loads):
@@ -86,9 +87,15 @@ class _Rows:
         for i, row in zip(order, chosen, strict=True):
             self.row[i] = row
         count = max(chosen, default=-1) + 1
-        self.size = [max(_size(one) for one, row in zip(loads, self.row, strict=True) if row == k) for k in range(count)]
+        self.size = [max(_size(one) for one, row in zip(loads, self.row, strict=True) if row == k)
+                     for k in range(count)]
         self.foot = [GAP + sum(size + LABEL + GAP for size in self.size[:k]) for k in range(count)]
         self.total = GAP + sum(size + LABEL + GAP for size in self.size)
+
+
+def _rise_of(one: DrawnLoad, most: float) -> float:
+    """How high the symbol itself is."""
+    return max(_rise(one.start, most), _rise(one.end, most)) if one.form == "line" else _size(one)
 
 
 def _extent(one: DrawnLoad, label_x: float, half: float) -> tuple[float, float]:
@@ -116,8 +123,8 @@ def _symbol(one: DrawnLoad, foot: float, most: float) -> str:
     if one.form == "line":
         return _strip(one, foot, most)
     if one.form == "moment":
-        x, y = one.x0, foot - 10
-        turn = curved_arrow(x, y, 9.5, clockwise=one.start is None or one.start >= 0.0)
+        x, y = one.x0, foot - 9
+        turn = curved_arrow(x, y, 11, clockwise=one.start is None or one.start >= 0.0)
         return path(turn, "", fill="none", stroke_width="1.6") + line(x, y - 2, x, y + 2, "")
     up = one.start is not None and one.start < 0.0
     shaft = arrow(one.x0, foot, foot - POINT, 8) if up else arrow(one.x0, foot - POINT, foot, 8)

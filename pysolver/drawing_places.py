@@ -6,7 +6,8 @@ from is read. For drawing only: bearings are left out here, so nothing is ever c
 left end of the beam.
 """
 
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
+from itertools import pairwise
 from statistics import fmean
 from typing import Any
 
@@ -57,12 +58,12 @@ def _from_readings(record: Record, readings: Readings) -> Stations:
     sizes = [part if part is not None and part >= 0.0 else nominal / 3 if i in (0, len(parts) - 1) else nominal
              for i, part in enumerate(parts)]
     edges = [sum(sizes[:i + 1]) for i in range(len(sizes))]
-    bare = Stations(supports=tuple(edges[:-1]), length=edges[-1], read=tuple(part is not None for part in parts), loads=(),
-                    hinges=())
+    bare = Stations(supports=tuple(edges[:-1]), length=edges[-1], read=tuple(part is not None for part in parts),
+                    loads=(), hinges=())
     loads = [_load_place(load, f"/loads/{i}", bare, readings) for i, load in enumerate(record["loads"])]
     hinges = [_place(hinge["position"], f"/hinges/{i}/position", bare, readings, 0.0)
               for i, hinge in enumerate(record["hinges"])]
-    return Stations(supports=bare.supports, length=bare.length, read=bare.read, loads=tuple(loads), hinges=tuple(hinges))
+    return replace(bare, loads=tuple(loads), hinges=tuple(hinges))
 
 
 def _best(readings: Readings, path: str) -> float | None:
@@ -77,7 +78,8 @@ def _load_place(load: dict[str, Any], path: str, at: Stations, readings: Reading
     return _place(load["position"], f"{path}/position", at, readings, width)
 
 
-def _place(position: dict[str, Any] | None, path: str, at: Stations, readings: Readings, width: float | None) -> Extent | None:
+def _place(position: dict[str, Any] | None, path: str, at: Stations, readings: Readings,
+           width: float | None) -> Extent | None:
     distance = _best(readings, f"{path}/distance")
     if position is None or distance is None or width is None:
         return None
@@ -92,13 +94,14 @@ def _place(position: dict[str, Any] | None, path: str, at: Stations, readings: R
 
 
 def _origin(position: dict[str, Any], at: Stations) -> tuple[float | None, float]:
-    way = -1.0 if position["from"] == "right_end" or (position["from"] == "support" and position["side"] == "left") else 1.0
-    if position["from"] == "left_end":
+    start = position["from"]
+    way = -1.0 if start == "right_end" or (start == "support" and position["side"] == "left") else 1.0
+    if start == "left_end":
         return 0.0, way
-    if position["from"] == "right_end":
+    if start == "right_end":
         return at.length, way
     j = position["support"]
-    if position["from"] is None or j is None or position["side"] is None or j >= len(at.supports):
+    if start is None or j is None or position["side"] is None or j >= len(at.supports):
         return None, way
     return at.supports[j], way
 
@@ -106,4 +109,5 @@ def _origin(position: dict[str, Any], at: Stations) -> tuple[float | None, float
 def _known_between(start: float, end: float, at: Stations) -> bool:
     """Whether every part of the beam between two places is read."""
     edges = [0.0, *at.supports, at.length]
-    return all(read for read, a, b in zip(at.read, edges, edges[1:], strict=False) if a < end - 1e-9 and start < b - 1e-9)
+    return all(read for read, (a, b) in zip(at.read, pairwise(edges), strict=True)
+               if a < end - 1e-9 and start < b - 1e-9)

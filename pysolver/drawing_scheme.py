@@ -1,12 +1,13 @@
-"""How does the beam look while it is being entered? A schematic for a phone in which every part is large enough to touch.
+"""How does the beam look while it is being entered? A schematic for a phone, every part large enough to touch.
 
-Spans keep a rough proportion between 96 and 260 units (one unit is one CSS pixel), so the drawing of a long beam is wider
-than a phone. What is not answered yet is drawn with a question mark; a blank record gives a drawing too. Places in m from
-the left end, as in found.py; without a Layout they are taken from the readings as far as these go.
+Spans keep a rough proportion between 96 and 260 units (one unit is one CSS pixel), so the drawing of a long beam is
+wider than a phone. What is not answered yet is drawn with a question mark; a blank record gives a drawing too. Places
+in m from the left end, as in found.py; without a Layout they are taken from the readings as far as these go.
 """
 
 from collections.abc import Sequence
 from dataclasses import dataclass
+from itertools import pairwise
 
 import numpy as np
 
@@ -15,6 +16,7 @@ from pysolver import svg
 from pysolver.display import System, show
 from pysolver.drawing_loads import DrawnLoad, draw_loads, height_of
 from pysolver.drawing_places import Stations, stations
+from pysolver.drawing_symbols import BEAM
 from pysolver.found import Layout, span_name
 from pysolver.readings import FORM_DIMENSION, Readings
 from pysolver.record import Record
@@ -22,16 +24,15 @@ from pysolver.record import Record
 NARROWEST, WIDEST = 96.0, 260.0
 LEAST_WIDTH = 340.0
 MARGIN = 34.0
-OVERHANG = (40.0, 90.0)
+OVERHANG = (58.0, 96.0)
 NOMINAL = 150.0  # what a span of mean length is drawn
-BEAM = 5.0
 NAMES, DIMENSIONS, FOOT = 40.0, 66.0, 84.0  # below the underside of the beam
 UNREAD_STRIP = 50.0
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Pick:
-    """A thing that a touch can select: its path in the record, a plain label (not escaped), its place in the viewBox."""
+    """A thing that a touch can select: path in the record, plain label (not escaped), place in the viewBox."""
 
     path: str
     label: str
@@ -51,7 +52,7 @@ class Working:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class _Frame:
-    """Where things stand across the paper. supports: of each support; left, right: tips of the beam; width: of the paper."""
+    """Where things stand across the paper: each support, the tips of the beam; width of the paper."""
 
     stations: Stations
     supports: tuple[float, ...]
@@ -75,10 +76,11 @@ def working(record: Record, layout: Layout | None, readings: Readings) -> Workin
     above = draw_loads(loads, y - BEAM / 2, frame.width)
     hinges = _hinges(frame)
     section = _section_place(frame, [x for x, _ in hinges])
-    parts = [above.markup, _supports(record, frame, y + BEAM / 2), _beam(frame, y),
+    parts = [above.markup, _supports(record, frame, y + BEAM / 2),
+             symbols.beam(frame.left, frame.right, y, [x for x, _ in hinges]),
              *(symbols.hinge(x, y, unread=unread) for x, unread in hinges),
-             symbols.cross_section(section, y + BEAM / 2 + 7), _dimensions(record, frame, readings, y + BEAM / 2, system),
-             _ends(record, frame, y + BEAM / 2)]
+             symbols.cross_section(section, y + BEAM / 2 + 7),
+             _dimensions(record, frame, readings, y + BEAM / 2, system), _ends(record, frame, y + BEAM / 2)]
     height = y + BEAM / 2 + FOOT + (14.0 if any(record["ends"].values()) else 0.0)
     picks = _picks(record, frame, above.centres, [x for x, _ in hinges], section, y)
     title = f"Working drawing of {svg.clean(record['place']['member'], 60) or 'the beam'}"
@@ -120,9 +122,9 @@ def _loads(record: Record, frame: _Frame, readings: Readings, system: System) ->
         else:
             x0, x1 = frame.x(place[0]), frame.x(place[1])
         start, end = _magnitudes(record, i, readings)
-        drawn.append(DrawnLoad(form=load["form"], x0=x0, x1=x1, start=start, end=end, unread=place is None or start is None,
-                               permanent=load["category"] == "permanent",
-                               label=magnitude_words(load["form"], start, end, system) + " ?" * (place is None and start is not None)))
+        words = magnitude_words(load["form"], start, end, system) + " ?" * (place is None and start is not None)
+        drawn.append(DrawnLoad(form=load["form"], x0=x0, x1=x1, start=start, end=end, label=words,
+                               unread=place is None or start is None, permanent=load["category"] == "permanent"))
     return drawn
 
 
@@ -145,10 +147,6 @@ def magnitude_words(form: str | None, start: float | None, end: float | None, sy
     return f"{figure} to {last}" if last.endswith(f" {unit}") else f"{first} to {last}"
 
 
-def _beam(frame: _Frame, y: float) -> str:
-    return svg.line(frame.left, y, frame.right, y, "beam", stroke_width=svg.num(BEAM))
-
-
 def _supports(record: Record, frame: _Frame, y: float) -> str:
     last = len(frame.supports) - 1
     parts = []
@@ -158,36 +156,39 @@ def _supports(record: Record, frame: _Frame, y: float) -> str:
         if one["kind"] == "free":
             parts.append(svg.text(x, y + 20, "free end", "label-small", size=svg.SMALL))
         parts.append(symbols.name(x, y + NAMES, svg.clean(one["name"])))
-    for written, x, side in ((record["overhangs"]["left"], frame.left, -1), (record["overhangs"]["right"], frame.right, 1)):
-        if written is not None:
-            parts.append(symbols.free_end(x, y, side))
+    parts += [symbols.free_end(x, y, side) for end, x, side in (("left", frame.left, -1), ("right", frame.right, 1))
+              if record["overhangs"][end] is not None]
     return "".join(parts)
 
 
 def _dimensions(record: Record, frame: _Frame, readings: Readings, y: float, system: System) -> str:
-    words = {"clear": "clear", "centres": "centres"}
-    parts = [_measure(readings, f"/spans/{i}/length", (x0, x1), y + DIMENSIONS, system, words.get(span["measure"] or "", ""))
-             for i, (span, x0, x1) in enumerate(zip(record["spans"], frame.supports, frame.supports[1:], strict=False))]
+    parts = [_measure(readings, f"/spans/{i}/length", across, y + DIMENSIONS, system, span["measure"] or "")
+             for i, (span, across) in enumerate(zip(record["spans"], pairwise(frame.supports), strict=True))]
     for end, x0, x1 in (("left", frame.left, frame.supports[0]), ("right", frame.supports[-1], frame.right)):
         if record["overhangs"][end] is not None:
             parts.append(_measure(readings, f"/overhangs/{end}", (x0, x1), y + DIMENSIONS, system, ""))
-            parts.append(svg.line(x0 if end == "left" else x1, y + 12, x0 if end == "left" else x1, y + DIMENSIONS + 5, "dim",
-                                  stroke_width="0.6"))
-    ticks = "".join(svg.line(x, y + NAMES + 12, x, y + DIMENSIONS + 5, "dim", stroke_width="0.6") for x in frame.supports)
-    return "".join(parts) + ticks
+            parts.append(_tick(x0 if end == "left" else x1, y + 14, y))
+    return "".join(parts) + "".join(_tick(x, y + NAMES + 12, y) for x in frame.supports)
+
+
+def _tick(x: float, start: float, y: float) -> str:
+    """The thin line from a thing down to its dimension line."""
+    return svg.line(x, start, x, y + DIMENSIONS + 5, "dim", stroke_width="0.6")
 
 
 def _measure(readings: Readings, path: str, across: tuple[float, float], y: float, system: System, below: str) -> str:
     read = readings.measured.get(path)
-    return symbols.dimension(*across, y, show("length", read.best, system) if read else "?", below=below, known=read is not None)
+    words = show("length", read.best, system) if read else "?"
+    return symbols.dimension(*across, y, words, below=below, known=read is not None)
 
 
 def _ends(record: Record, frame: _Frame, y: float) -> str:
     """What people on site call the two ends."""
     longest = int(frame.width / 2 / 8)
     left, right = (svg.clean(record["ends"][end], longest) for end in ("left", "right"))
-    return ((svg.text(6, y + FOOT + 8, left, "label-small", anchor="start", size=svg.SMALL) if left else "")
-            + (svg.text(frame.width - 6, y + FOOT + 8, right, "label-small", anchor="end", size=svg.SMALL) if right else ""))
+    places = ((6.0, left, "start"), (frame.width - 6, right, "end"))
+    return "".join(svg.text(x, y + FOOT + 8, words, "label-small", anchor=anchor, size=svg.SMALL)
+                   for x, words, anchor in places if words)
 
 
 def _hinges(frame: _Frame) -> list[tuple[float, bool]]:
@@ -201,7 +202,7 @@ def _hinges(frame: _Frame) -> list[tuple[float, bool]]:
 
 def _section_place(frame: _Frame, hinges: Sequence[float]) -> float:
     """The middle of the span that is farthest from any hinge, so that a finger can tell the two apart."""
-    middles = [0.5 * (a + b) for a, b in zip(frame.supports, frame.supports[1:], strict=False)]
+    middles = [0.5 * (a + b) for a, b in pairwise(frame.supports)]
     return max(middles, key=lambda x: min([abs(x - h) for h in hinges], default=0.0))
 
 
@@ -212,15 +213,16 @@ def _picks(record: Record, frame: _Frame, loads: Sequence[svg.Point], hinges: Se
     for j, (one, x) in enumerate(zip(record["supports"], frame.supports, strict=True)):
         found.append(Pick(path=f"/supports/{j}", label=f"Support {svg.clean(one['name'])}", x=x, y=under + 20))
         if j < len(record["spans"]):
-            middle = 0.5 * (x + frame.supports[j + 1])
-            found.append(Pick(path=f"/spans/{j}", label=f"Span {svg.clean(span_name(record, j))}", x=middle, y=under + DIMENSIONS - 6))
+            found.append(Pick(path=f"/spans/{j}", label=f"Span {svg.clean(span_name(record, j))}",
+                              x=0.5 * (x + frame.supports[j + 1]), y=under + DIMENSIONS - 6))
     for i, (load, (x, up)) in enumerate(zip(record["loads"], loads, strict=True)):
         name = svg.clean(load["name"], 60)
         found.append(Pick(path=f"/loads/{i}", label=f"Load: {name}" if name else f"Load {i + 1}", x=x, y=up))
     found += [Pick(path=f"/hinges/{i}", label=f"Hinge {i + 1}", x=x, y=y) for i, x in enumerate(hinges)]
     for end, a, b in (("left", frame.left, frame.supports[0]), ("right", frame.supports[-1], frame.right)):
         if record["overhangs"][end] is not None:
-            found.append(Pick(path=f"/overhangs/{end}", label=f"Overhang at the {end}", x=0.5 * (a + b), y=under + DIMENSIONS - 6))
+            found.append(Pick(path=f"/overhangs/{end}", label=f"Overhang at the {end}", x=0.5 * (a + b),
+                              y=under + DIMENSIONS - 6))
     found.append(Pick(path="/section", label="Member section", x=section, y=under + 16))
     return _apart(found)
 

@@ -4,13 +4,15 @@ Viewbox units, y down. (x, y) of a support is the place where the underside of t
 """
 
 import math
+from collections.abc import Sequence
 
 from pysolver.svg import SMALL, Point, circle, group, hatched, line, num, path, polyline, rect, text
 
 HALF_WALL = 16.0
 WALL = 15.0  # depth of the hatched wall
 PLATE = 4.0
-SUPPORT_DEPTH = 24.0  # under the beam, whatever the kind
+BEAM = 5.0  # depth of the bar
+RING = 5.0  # radius of a hinge
 
 
 def support(kind: str | None, x: float, y: float, *, side: int = 0, rotational: bool = False) -> str:
@@ -65,13 +67,13 @@ def _built_in(x: float, y: float, side: int) -> str:
 
 
 def free_end(x: float, y: float, side: int) -> str:
-    """Nothing below: a break mark at the tip."""
-    return "".join(polyline([(x + dx, y - 11), (x + dx + 3 * side, y - 5), (x + dx - side, y - 2), (x + dx + 2 * side, y + 4)],
-                            "free-end", fill="none", stroke_width="1.2") for dx in (3 * side, 6 * side))
+    """Nothing below: an upright stroke just off the tip."""
+    return line(x + 7 * side, y - 13, x + 7 * side, y + 8, "free-end", stroke_width="1.6", stroke_dasharray="3 3")
 
 
 def _not_known(x: float, y: float) -> str:
-    triangle = polyline([(x, y), (x - 13, y + 20), (x + 13, y + 20)], "support unread", closed=True, stroke_dasharray="2 3")
+    triangle = polyline([(x, y), (x - 13, y + 20), (x + 13, y + 20)], "support unread", closed=True,
+                        stroke_dasharray="2 3")
     return triangle + text(x, y + 18, "?", "label unread")
 
 
@@ -91,29 +93,40 @@ def name(x: float, y: float, words: str) -> str:
             + text(x, y + 5, short, "name", size=14))
 
 
+def beam(left: float, right: float, y: float, hinges: Sequence[float]) -> str:
+    """The bar of the beam, parted at its hinges so that their rings stay open."""
+    edges = [left, *(e for x in sorted(hinges) for e in (x - RING - BEAM / 2, x + RING + BEAM / 2)), right]
+    bars = zip(edges[::2], edges[1::2], strict=True)
+    return "".join(line(a, y, b, y, "beam", stroke_width=num(BEAM)) for a, b in bars if b > a)
+
+
 def hinge(x: float, y: float, *, unread: bool = False) -> str:
     """A ring on the axis of the beam."""
     extra = text(x, y - 9, "?", "label unread") if unread else ""
-    return circle(x, y, 5, "hinge unread" if unread else "hinge", stroke_width="2") + extra
+    return circle(x, y, RING, "hinge unread" if unread else "hinge", stroke_width="2") + extra
 
 
 def arrow(x: float, start: float, end: float, head: float = 6.0) -> str:
     """An upright arrow from start to its head at end, as path data."""
     way = 1.0 if end > start else -1.0
-    return (f"M{num(x)} {num(start)}L{num(x)} {num(end)}M{num(x - head / 2)} {num(end - way * head)}L{num(x)} {num(end)}"
-            f"L{num(x + head / 2)} {num(end - way * head)}")
+    back = num(end - way * head)
+    return (f"M{num(x)} {num(start)}L{num(x)} {num(end)}"
+            f"M{num(x - head / 2)} {back}L{num(x)} {num(end)}L{num(x + head / 2)} {back}")
 
 
 def curved_arrow(x: float, y: float, radius: float, *, clockwise: bool) -> str:
-    """Three quarters of a turn about (x, y), open at the bottom, as path data."""
+    """Over the top of (x, y) from one side to the other, the head pointing down, as path data."""
     way = 1.0 if clockwise else -1.0
-    dx, dy = radius * math.sin(math.radians(40)), radius * math.cos(math.radians(40))
+    dx, dy = radius * math.sin(math.radians(70)), radius * math.cos(math.radians(70))
     start, end = (x - way * dx, y + dy), (x + way * dx, y + dy)
     # the tangent at the end of the turn, from which the two strokes of the head are laid back
     tangent = math.atan2(dx, -way * dy)
-    strokes = [(end[0] - 6 * math.cos(tangent + t), end[1] - 6 * math.sin(tangent + t)) for t in (0.5, -0.5)]
-    return (f"M{num(start[0])} {num(start[1])}A{num(radius)} {num(radius)} 0 1 {1 if clockwise else 0} {num(end[0])} {num(end[1])}"
-            + "".join(f"M{num(a)} {num(b)}L{num(end[0])} {num(end[1])}" for a, b in strokes))
+    # the arc bends away from its tangent, so both strokes are turned a little towards the centre
+    strokes = [(end[0] - 7 * math.cos(tangent + t), end[1] - 7 * math.sin(tangent + t))
+               for t in (0.5 - 0.2 * way, -0.5 - 0.2 * way)]
+    tip = f"{num(end[0])} {num(end[1])}"
+    return (f"M{num(start[0])} {num(start[1])}A{num(radius)} {num(radius)} 0 1 {1 if clockwise else 0} {tip}"
+            + "".join(f"M{num(a)} {num(b)}L{tip}" for a, b in strokes))
 
 
 def dimension(x0: float, x1: float, y: float, words: str, *, below: str = "", known: bool = True) -> str:

@@ -62,22 +62,7 @@ class Reading:
 
 def missing(record: Record, readings: Readings) -> list[InputError]:
     """What must still be answered before there is a beam to solve, each with its field."""
-    wanted: list[tuple[str, str]] = []
-    for i, support in enumerate(record["supports"]):
-        if support["kind"] is None:
-            wanted.append((f"/supports/{i}/kind", f"The kind of support {support['name']}"))
-        if support["kind"] == "spring" and support["stiffness"] is None:
-            wanted.append((f"/supports/{i}/stiffness", f"The spring stiffness of support {support['name']}"))
-    for i, span in enumerate(record["spans"]):
-        name = span_name(record, i)
-        if span["length"] is None:
-            wanted.append((f"/spans/{i}/length", f"The length of span {name}"))
-        elif span["measure"] is None:
-            wanted.append((f"/spans/{i}/measure", f"Whether span {name} was measured clear or centre to centre"))
-        for j in (i, i + 1):
-            if span["measure"] == "clear" and record["supports"][j]["bearing"] is None \
-                    and record["supports"][j]["kind"] != "free":
-                wanted.append((f"/supports/{j}/bearing", f"The bearing length of support {record['supports'][j]['name']}"))
+    wanted = [*_support_gaps(record), *_span_gaps(record)]
     for i, load in enumerate(record["loads"]):
         wanted += [(f"/loads/{i}/{f}", text) for f, text in _load_gaps(load)]
     for i, hinge in enumerate(record["hinges"]):
@@ -88,13 +73,38 @@ def missing(record: Record, readings: Readings) -> list[InputError]:
             for field, text in dict(wanted).items() if field not in unread]
 
 
+def _support_gaps(record: Record) -> list[tuple[str, str]]:
+    wanted: list[tuple[str, str]] = []
+    for i, support in enumerate(record["supports"]):
+        if support["kind"] is None:
+            wanted.append((f"/supports/{i}/kind", f"The kind of support {support['name']}"))
+        if support["kind"] == "spring" and support["stiffness"] is None:
+            wanted.append((f"/supports/{i}/stiffness", f"The spring stiffness of support {support['name']}"))
+    return wanted
+
+
+def _span_gaps(record: Record) -> list[tuple[str, str]]:
+    wanted: list[tuple[str, str]] = []
+    for i, span in enumerate(record["spans"]):
+        name = span_name(record, i)
+        if span["length"] is None:
+            wanted.append((f"/spans/{i}/length", f"The length of span {name}"))
+        elif span["measure"] is None:
+            wanted.append((f"/spans/{i}/measure", f"Whether span {name} was measured clear or centre to centre"))
+        for j in (i, i + 1):
+            if span["measure"] == "clear" and record["supports"][j]["bearing"] is None \
+                    and record["supports"][j]["kind"] != "free":
+                wanted.append((f"/supports/{j}/bearing", f"The bearing length of support {record['supports'][j]['name']}"))
+    return wanted
+
+
 def span_name(record: Record, i: int) -> str:
     """A–B: the span between two supports by their names."""
     return f"{record['supports'][i]['name']}–{record['supports'][i + 1]['name']}"
 
 
 def load_name(load: dict[str, Any]) -> str:
-    return load["name"].strip() or "the load"
+    return str(load["name"]).strip() or "the load"
 
 
 def _load_gaps(load: dict[str, Any]) -> list[tuple[str, str]]:
@@ -205,8 +215,11 @@ class _Frame:
             support = self.record["supports"][j]
             springs = {name: self.pick(f"/supports/{j}/{name}") for name in ("stiffness", "rotational")
                        if support[name] is not None and (name == "rotational" or support["kind"] == "spring")}
-            made.append(_in_support(j, lambda: Support(x=self.x[j], kind=support["kind"],
-                                                       settlement=self._or_zero(f"/supports/{j}/settlement"), **springs)))
+            try:
+                made.append(Support(x=self.x[j], kind=support["kind"], settlement=self._or_zero(f"/supports/{j}/settlement"),
+                                    **springs))
+            except InputError as error:
+                raise error.moved(f"/supports/{j}/{error.field}") from None
         return tuple(made)
 
     def place(self, position: dict[str, Any], path: str, width: float) -> tuple[float, float]:
@@ -253,13 +266,6 @@ def _in_record(record: Record, make: Callable[[], Any]) -> Any:
         raise error.moved("/" + error.field.lstrip("/")) from None
 
 
-def _in_support(j: int, make: Callable[[], Support]) -> Support:
-    try:
-        return make()
-    except InputError as error:
-        raise error.moved(f"/supports/{j}/{error.field}") from None
-
-
 def _stretches(record: Record, readings: Readings, pick: Pick, frame: _Frame) -> tuple[Stretch, ...]:
     """The base stiffness, cut by the zones that have another."""
     base = pick("/section/stiffness") if record["section"]["stiffness"] is not None else ANY_STIFFNESS
@@ -303,7 +309,7 @@ def _loads(record: Record, readings: Readings, pick: Pick, frame: _Frame) -> lis
 
 def source_of(load: dict[str, Any]) -> str:
     """The unknown that a load belongs to: what the person named as its source, or itself."""
-    return load["source"].strip() or load["id"]
+    return str(load["source"]).strip() or str(load["id"])
 
 
 def _one_load(load: dict[str, Any], path: str, best: dict[str, float], pick: Pick, frame: _Frame) -> Load:

@@ -19,7 +19,7 @@ from pysolver.found import SELF_WEIGHT, Layout, Reading, lay_out, source_of
 from pysolver.limits import Criterion, criteria, set_of
 from pysolver.readings import Readings
 from pysolver.record import Record
-from pysolver.statics import SETTLEMENT
+from pysolver.stiffness import SETTLEMENT
 from pysolver.units import parse
 
 Floats = NDArray[np.float64]

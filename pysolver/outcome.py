@@ -7,7 +7,7 @@ judged, clear the area. Nothing here permits anything: decisions are a person's 
 
 from collections.abc import Sequence
 from dataclasses import dataclass
-from datetime import datetime, timedelta, timezone
+from datetime import UTC, datetime, timedelta
 
 from pysolver.facts import Gap
 
@@ -98,7 +98,7 @@ def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: boo
            lifting: Sequence[Gap], from_memory: bool) -> Outcome:
     """The outcome of a check. uncovered: kinds of effect without a limit (J22); lifting: bearings that would open (J20)."""
     strength = [c for c in compared if c.kind != "sag"]
-    every_gap = tuple([*gaps, *lifting, *uncovered])
+    every_gap = (*gaps, *lifting, *uncovered)
     over = [c for c in strength if numbers_over(c)]
     leading = _leading(strength)
     memory = ("The factors of this set are from memory: check them against the standard.",) if from_memory else ()
@@ -212,4 +212,4 @@ def _moment(text: str) -> datetime | None:
         moment = datetime.fromisoformat(text.replace("Z", "+00:00"))
     except ValueError:
         return None
-    return moment.replace(tzinfo=timezone.utc) if moment.tzinfo is None else moment
+    return moment.replace(tzinfo=UTC) if moment.tzinfo is None else moment

@@ -28,9 +28,8 @@ def evaluate(coefficients: Floats, s: Floats) -> Floats:
 def derivative(coefficients: Floats) -> Floats:
     """Coefficients of dp/ds; shape (..., d+1) -> (..., max(d, 1))."""
     degree = coefficients.shape[-1] - 1
-    if degree == 0:
-        return np.zeros_like(coefficients)
-    return coefficients[..., 1:] * np.arange(1.0, degree + 1)
+    slope: Floats = coefficients[..., 1:] * np.arange(1.0, degree + 1)
+    return slope if degree else np.zeros_like(coefficients)
 
 
 def zeros(coefficients: Floats, length: Floats) -> Floats:
@@ -61,7 +60,8 @@ def _zero_of_line(p: Floats) -> Floats:
     inside = (c0 * (c0 + c1) < 0.0) | ((c0 == 0.0) & (c1 != 0.0)) | ((c0 + c1 == 0.0) & (c1 != 0.0))
     place = np.full(c0.shape, np.nan)
     place[inside] = -c0[inside] / c1[inside]
-    return np.clip(place, 0.0, 1.0)[..., None]
+    inside_unit: Floats = np.clip(place, 0.0, 1.0)[..., None]
+    return inside_unit
 
 
 def _bisect(p: Floats, low: Floats, high: Floats) -> Floats:

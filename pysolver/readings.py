@@ -63,7 +63,7 @@ def _everything(record: Record) -> Iterator[tuple[str, Any, str, bool]]:
         yield from _position(f"/hinges/{i}/position", hinge["position"], True)
     yield from _section(record)
     for i, load in enumerate(record["loads"]):
-        dimension = FORM_DIMENSION.get(load["form"])
+        dimension = FORM_DIMENSION.get(load["form"] or "", "")
         if dimension:
             yield f"/loads/{i}/magnitude", load["magnitude"], dimension, True
             yield f"/loads/{i}/magnitude_end", load["magnitude_end"], dimension, True

@@ -1,7 +1,7 @@
 """How is a drawing written as SVG? Strings in, one markup string out; every text is escaped here and nowhere else.
 
-Coordinates are viewBox units (one CSS pixel at natural size), x to the right, y down. No colours, no style, no script and
-nothing external: parts carry classes that the page's style sheet inks. `currentColor` on the root keeps a drawing
+Coordinates are viewBox units (one CSS pixel at natural size), x to the right, y down. No colours, no style, no script
+and nothing external: parts carry classes that the page's style sheet inks. `currentColor` on the root keeps a drawing
 readable where no style sheet is loaded (a printed report, a file opened by itself); any class rule overrides it.
 """
 
@@ -16,7 +16,7 @@ PLAIN = 13.0
 TITLE = 15.0
 
 # not allowed in XML 1.0 (chapter 2.2: controls, surrogates, U+FFFE, U+FFFF), or able to turn round the reading order
-_BANNED = [*range(0x00, 0x20), *range(0x7F, 0xA0), *range(0x200E, 0x2010), *range(0x2028, 0x202F), *range(0x2066, 0x206A),
+_BANNED = [*range(0x20), *range(0x7F, 0xA0), *range(0x200E, 0x2010), *range(0x2028, 0x202F), *range(0x2066, 0x206A),
            *range(0xD800, 0xE000), 0xFFFE, 0xFFFF]
 _CLEAN = dict.fromkeys(_BANNED, " ")
 
@@ -100,5 +100,6 @@ def document(width: float, height: float, parts: Iterable[str], *, name: str, ti
     ids = f"asfound-{name}-title", f"asfound-{name}-desc"
     return (f'<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 {num(width)} {num(height)}" role="img"'
             f' aria-labelledby="{ids[0]} {ids[1]}" fill="none" stroke="currentColor" font-family="sans-serif">'
-            f'<title id="{ids[0]}">{escape(clean(title))}</title><desc id="{ids[1]}">{escape(clean(description, 2000))}</desc>'
+            f'<title id="{ids[0]}">{escape(clean(title))}</title>'
+            f'<desc id="{ids[1]}">{escape(clean(description, 2000))}</desc>'
             f'{"".join(parts)}</svg>')

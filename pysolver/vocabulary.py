@@ -12,7 +12,7 @@ from pysolver.measured import means_table
 @cache
 def words() -> dict[str, Any]:
     """The lists of vocabulary.json, with combination sets and ways of measuring added from their own data."""
-    lists = json.loads(resources.files("pysolver").joinpath("vocabulary.json").read_text("utf-8"))
+    lists: dict[str, Any] = json.loads(resources.files("pysolver").joinpath("vocabulary.json").read_text("utf-8"))
     lists["sets"] = [{"id": s.id, "label": s.label, "edition": s.edition, "basis": s.basis, "from_memory": s.from_memory,
                       "help": s.data["source"]} for s in sets().values()]
     for group in ("length", "load", "stiffness", "settlement"):
@@ -23,4 +23,4 @@ def words() -> dict[str, Any]:
 
 def label(name: str, item: str) -> str:
     """The label of one item of a list; the item itself when the list does not have it."""
-    return next((entry["label"] for entry in words()[name] if entry["id"] == item), item)
+    return next((str(entry["label"]) for entry in words()[name] if entry["id"] == item), item)

@@ -6,8 +6,8 @@ import sys
 import hypothesis
 import pytest
 
-hypothesis.settings.register_profile("default", deadline=None, max_examples=60)
-hypothesis.settings.register_profile("ci", deadline=None, max_examples=60, derandomize=True)
+hypothesis.settings.register_profile("default", deadline=None, max_examples=60, database=None)
+hypothesis.settings.register_profile("ci", deadline=None, max_examples=60, database=None, derandomize=True)
 hypothesis.settings.load_profile("ci" if os.environ.get("CI") else "default")
 
 

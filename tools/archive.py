@@ -21,11 +21,12 @@ RUN_TIME_WHEELS = {"fastjsonschema"}
 
 @dataclass(frozen=True, kw_only=True)
 class Archives:
-    """What `build` made: `folder` holds all run-time files, `libraries` pairs of file and place in site-packages."""
+    """What `build` made: `folder` with the files, `libraries` as pairs of file and place in site-packages."""
 
     folder: Path
     libraries: list[list[str]]
     packages: dict[str, int]
+    python: str
     examples: int
 
 
@@ -93,9 +94,7 @@ def build(wheels: list[Path]) -> Archives:
     build_standard_library()
     build_application(wheels)
     result = json.loads((APPLICATION / "result.json").read_text())
-    return Archives(
-        folder=APPLICATION, libraries=result["libraries"], packages=result["packages"], examples=result["examples"]
-    )
+    return Archives(folder=APPLICATION, **result)
 
 
 def lay_out(archives: Archives, dist: Path) -> dict[str, Any]:

@@ -38,17 +38,15 @@ def check_page(dist: Path) -> None:
     for what, pattern in patterns.items():
         found = re.search(pattern, text, re.I)
         if found:
-            raise ToolError(
-                f"web/index.html has {what} ({found[0][:60]}): move it into a file, the site's policy blocks it."
-            )
+            raise ToolError(f"web/index.html has {what} ({found[0][:60]}): move it into a file, the site's policy blocks it.")
 
 
-def about() -> dict[str, str]:
+def about(python: str) -> dict[str, str]:
     """Versions that build.json states besides the build's own hash."""
     project = tomllib.loads((ROOT / "pyproject.toml").read_text())["project"]
     numpy = next(file for file in runtime.locked_files() if file.package == "numpy")
     info = runtime.lock_info()
-    return {"version": project["version"], "pyodide": info["version"], "python": info["python"], "numpy": numpy.version}
+    return {"version": project["version"], "pyodide": info["version"], "python": python, "numpy": numpy.version}
 
 
 def lay_out(dist: Path, wheels: list[Path], archives: archive.Archives) -> dict[str, str]:
@@ -58,7 +56,7 @@ def lay_out(dist: Path, wheels: list[Path], archives: archive.Archives) -> dict[
     told = archive.lay_out(archives, dist)
     pure = downloads.pure_wheels(archive.RUN_TIME_WHEELS)
     (dist / "notices.txt").write_text(notices([wheels[0], *pure]), encoding="utf-8")
-    build = precache.write_build(dist, told, about())
+    build = precache.write_build(dist, told, about(archives.python))
     check_page(dist)
     vendor.check_imports(dist)
     precache.write_service_worker(dist, build["build"])

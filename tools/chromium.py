@@ -15,9 +15,7 @@ MAC = (
     "/Applications/Google Chrome.app/Contents/MacOS/Google Chrome",
     "/Applications/Chromium.app/Contents/MacOS/Chromium",
 )
-ADVICE = (
-    "Chromium for the browser tests is missing: run `.venv/bin/playwright install --with-deps chromium` and try again."
-)
+ADVICE = "Chromium for the browser tests is missing: run `.venv/bin/playwright install --with-deps chromium` and try again."
 
 
 def launches(program: str) -> bool:

@@ -59,14 +59,10 @@ def pip_wheel_from_index() -> bytes:
         page, address = fetch(f"{index}/pip/")
         link = re.search(r'href="([^"]*' + re.escape(PIP_WHEEL) + r')(#[^"]*)?"', page.decode("utf-8", "replace"))
         if not link:
-            raise ToolError(
-                f"{index} has no {PIP_WHEEL}: use an index that mirrors PyPI, or install pip for {sys.executable}."
-            )
+            raise ToolError(f"{index} has no {PIP_WHEEL}: use an index that mirrors PyPI, or install pip for {sys.executable}.")
         return fetch(urllib.parse.urljoin(address, link[1]))[0]
     except (urllib.error.URLError, OSError) as error:
-        raise ToolError(
-            f"{index} can't be reached ({error}): connect, or set PIP_INDEX_URL to an index that can."
-        ) from None
+        raise ToolError(f"{index} can't be reached ({error}): connect, or set PIP_INDEX_URL to an index that can.") from None
 
 
 def pip_wheel() -> Path:
@@ -97,9 +93,7 @@ def pip_wheel() -> Path:
         body = pip_wheel_from_index()
         found = hashlib.sha256(body).hexdigest()
         if found != PIP_SHA256:
-            raise ToolError(
-                f"{PIP_WHEEL} has sha256 {found}, wanted {PIP_SHA256}: refused; try another network or mirror."
-            )
+            raise ToolError(f"{PIP_WHEEL} has sha256 {found}, wanted {PIP_SHA256}: refused; try another network or mirror.")
         wheel.write_bytes(body)
     return wheel
 
@@ -114,9 +108,7 @@ def pinned(names: set[str]) -> str:
     texts = re.split(r"^(?=[\w.-]+==)", REQUIREMENTS.read_text(), flags=re.M)[1:]
     missing = names - set(blocks)
     if missing:
-        raise ToolError(
-            f"{', '.join(sorted(missing))} has no pin in tools/requirements.txt: add it (python3 -m tools lock)."
-        )
+        raise ToolError(f"{', '.join(sorted(missing))} has no pin in tools/requirements.txt: add it (python3 -m tools lock).")
     return "".join(text for name, text in zip(blocks, texts, strict=True) if name in names)
 
 

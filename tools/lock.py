@@ -70,8 +70,7 @@ def write_requirements() -> None:
     with step("tools/requirements.txt") as running:
         packages = resolved()
         blocks = [
-            f"{name}=={version} \\\n"
-            + " \\\n".join(f"    --hash=sha256:{digest}" for digest in wheel_hashes(name, version))
+            f"{name}=={version} \\\n" + " \\\n".join(f"    --hash=sha256:{digest}" for digest in wheel_hashes(name, version))
             for name, version in packages
         ]
         head = "# All packages for .venv, pinned with the hashes of their wheels. Written by `python3 -m tools lock`.\n"

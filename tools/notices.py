@@ -34,9 +34,7 @@ def wheel_notices(wheel: Path) -> list[tuple[str, str]]:
     title = " ".join(wheel.name.split("-")[:2])
     with zipfile.ZipFile(wheel) as archive:
         names = [
-            name
-            for name in archive.namelist()
-            if "/licenses/" in name or name.rpartition("/")[2].upper().startswith("LICEN")
+            name for name in archive.namelist() if "/licenses/" in name or name.rpartition("/")[2].upper().startswith("LICEN")
         ]
         found = [
             (f"{title}: {name.partition('.dist-info/')[2] or name}", archive.read(name).decode("utf-8", "replace"))

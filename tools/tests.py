@@ -53,9 +53,7 @@ def wasm() -> bool:
     """The tests of pysolver once more, in Pyodide under Node, against the archives that ship."""
     wheels = [*downloads.pure_wheels(PYTEST_WHEELS), runtime.ensure()[0]]
     options = ("--disable-warning=MODULE_TYPELESS_PACKAGE_JSON", "--stack-size=4000")
-    return call(
-        [node.node(), *options, TOOLS / "pyodide" / "run_pytest.mjs", DIST, ROOT / "tests", *wheels], node.environment()
-    )
+    return call([node.node(), *options, TOOLS / "pyodide" / "run_pytest.mjs", DIST, ROOT / "tests", *wheels], node.environment())
 
 
 def javascript() -> bool:
@@ -83,6 +81,11 @@ class Check:
     run: Callable[[], bool]
     files: str
 
+    @property
+    def summary(self) -> str:
+        """What it does, in a line."""
+        return (self.run.__doc__ or self.name).splitlines()[0]
+
 
 CHECKS = (
     Check(name="lint", run=lint, files="tools/*.py"),
@@ -97,7 +100,7 @@ CHECKS = (
 def list_checks() -> None:
     """Print the steps."""
     for check in CHECKS:
-        print(f"{check.name:8}{(check.run.__doc__ or '').splitlines()[0]}")
+        print(f"{check.name:8}{check.summary}")
 
 
 def chosen(names: Sequence[str]) -> list[Check]:
@@ -115,7 +118,7 @@ def chosen(names: Sequence[str]) -> list[Check]:
 
 def run_check(check: Check) -> str:
     """Run one step under a heading; returns the word for the summary."""
-    print(f"\n=== {check.name}: {(check.run.__doc__ or '').splitlines()[0]}", flush=True)
+    print(f"\n=== {check.name}: {check.summary}", flush=True)
     if not list(ROOT.glob(check.files)):
         print(f"nothing matches {check.files} yet")
         return "nothing to check"

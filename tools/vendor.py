@@ -26,9 +26,7 @@ MODULES = {
 PACKAGES = ("preact", "htm", "@preact/signals-core", "@preact/signals", "idb", "fflate", "uqr", "pyodide")
 
 # `from"x"`, `import"x"`, `import("x")`, as written by people and by minifiers.
-SPECIFIER = re.compile(
-    r"""(?P<before>(?<![\w.$])(?:from|import)\s*\(?\s*)(?P<quote>["'])(?P<name>[^"'\n]+)(?P=quote)"""
-)
+SPECIFIER = re.compile(r"""(?P<before>(?<![\w.$])(?:from|import)\s*\(?\s*)(?P<quote>["'])(?P<name>[^"'\n]+)(?P=quote)""")
 COMMENT = re.compile(r"/\*.*?\*/|^\s*//[^\n]*$", re.S | re.M)
 
 
@@ -68,11 +66,7 @@ def check_imports(dist: Path) -> None:
         for match in SPECIFIER.finditer(COMMENT.sub("", module.read_text(encoding="utf-8"))):
             name, where = match["name"], module.relative_to(dist)
             if is_bare(name):
-                raise ToolError(
-                    f"{where} imports '{name}' by a bare name: import './vendor/...' or add it to tools/vendor.py."
-                )
+                raise ToolError(f"{where} imports '{name}' by a bare name: import './vendor/...' or add it to tools/vendor.py.")
             target = posixpath.normpath(posixpath.join(folder, name))
             if not (dist / target).is_file():
-                raise ToolError(
-                    f"{where} imports '{name}', but the site has no {target}: correct the path or add the file."
-                )
+                raise ToolError(f"{where} imports '{name}', but the site has no {target}: correct the path or add the file.")

@@ -36,7 +36,7 @@ function limitStation(record, i, vocabulary) {
     make.choice(`${path}/kind`, 'Kind of figure', vocabulary.kinds), make.choice(`${path}/basis`, 'Basis', vocabulary.bases),
     ...setFields(sheet, path, make, vocabulary), ...coverFields(record, sheet, path, make, vocabulary),
     ...sheet.entries.flatMap((/** @type {any} */ _, /** @type {number} */ k) => entryFields(record, i, k, vocabulary)),
-    make.heading(`${path}/entries`, sheet.entries.length ? 'Add a further limit' : 'Add each limit that the sheet gives'),
+    make.heading(`${path}/entries`, sheet.entries.length ? 'Add a further limit' : 'Add each limit that the sheet gives', { pause: true }),
     ...vocabulary.criteria.map((criterion) => make.action(`${path}/entries`, `+ ${criterion.label}`,
       (now) => addEntry(now, i, criterion.id), { name: `${title}, add ${criterion.label.toLowerCase()}`, go: `${path}/entries/${sheet.entries.length}/value`, help: criterion.help })),
     ...issuedFor(sheet, path, make, vocabulary),

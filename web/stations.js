@@ -40,5 +40,5 @@ export function fieldOf(station, path) {
 /** What Next leads to: the next field that is neither a button nor under "More". @param {Station} station @param {string} path */
 export function fieldAfter(station, path) {
   const at = station.fields.findIndex((field) => field.path === path);
-  return station.fields.slice(at + 1).find((field) => ['number', 'choice', 'text', 'many'].includes(field.kind) && !field.extra);
+  return station.fields.slice(at + 1).find((field) => field.pause || (['number', 'choice', 'text', 'many'].includes(field.kind) && !field.extra));
 }

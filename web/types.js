@@ -22,6 +22,7 @@
  * @property {Option[]} [options] ids of yes/no questions are 'true' and 'false'
  * @property {boolean} [yesNo]
  * @property {boolean} [extra] stands under "More"
+ * @property {boolean} [pause] Next stops at this heading: buttons stand below it
  * @property {boolean} [sag] a sag limit may be written as a part of the span, L/360
  * @property {string} [help]
  * @property {string} [load] id of the load a photo belongs to, '' for the whole check

@@ -56,7 +56,7 @@ async function application(pyodideFolder, outFolder, bootstrap, wheels) {
   for (const library of libraries) {
     fs.writeFileSync(path.join(outFolder, libraryFile(library)), python.FS.readFile(`${SITE}/${library}`));
   }
-  return { libraries: libraries.map((library) => [libraryFile(library), library]), examples, packages };
+  return { libraries: libraries.map((library) => [libraryFile(library), library]), examples, packages, python: python.runPython('import platform; platform.python_version()') };
 }
 
 /** numpy/linalg/_umath_linalg.cpython-314-....so -> numpy-umath-linalg.wasm; the ending makes hosts compress it. */

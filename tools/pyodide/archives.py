@@ -25,7 +25,7 @@ HEADER = importlib.util.MAGIC_NUMBER + (1).to_bytes(4, "little") + bytes(8)
 LEFT_OUT = re.compile(
     r"(unittest|_pyrepl|multiprocessing|xmlrpc|wsgiref|sqlite3|mailbox|imaplib|poplib|smtplib|ftplib|pdb|doctest|pydoc"
     r"|_sysconfigdata|cProfile|profile|pstats|trace\.|tabnanny|pyclbr|pickletools|optparse|webbrowser|antigravity|this\."
-    r"|socketserver|xml/|ctypes/macholib|concurrent/interpreters|__phello|http/server|http/cookiejar|logging/handlers"
+    r"|socketserver|xml/(?!__init__|sax)|ctypes/macholib|concurrent/interpreters|__phello|http/server|http/cookiejar|logging/handlers"
     r"|logging/config|asyncio/windows|asyncio/proactor|asyncio/__main__|tomllib|configparser|netrc|plistlib"
     r"|nturl2path|mimetypes|getopt|cmd\.|code\.|bdb|rlcompleter|sched|shelve|pty|tty|symtable|timeit|tracemalloc|zipapp"
     r"|compileall|py_compile|modulefinder|filecmp|fileinput)"
@@ -54,9 +54,7 @@ def without_docstrings(tree: ast.Module) -> ast.Module:
 def compiled(source: bytes, shown_path: str, keep_docstrings: bool) -> bytes:
     """A .pyc file for the source; `shown_path` is what tracebacks show."""
     tree = ast.parse(source, shown_path)
-    code = compile(
-        tree if keep_docstrings else without_docstrings(tree), shown_path, "exec", dont_inherit=True, optimize=0
-    )
+    code = compile(tree if keep_docstrings else without_docstrings(tree), shown_path, "exec", dont_inherit=True, optimize=0)
     # Twice through marshal: the first pass depends on which objects happen to be shared in memory.
     return HEADER + marshal.dumps(marshal.loads(marshal.dumps(code)))
 
@@ -160,9 +158,7 @@ def check_imports(members: dict[str, bytes]) -> None:
         if file.endswith(".py"):
             for name in imported_names(source, file.removesuffix(".py").replace("/", ".")):
                 if name.split(".")[0] in sys.stdlib_module_names and LEFT_OUT.match(name.replace(".", "/") + "."):
-                    raise ModuleNotFoundError(
-                        f"{file} imports {name}, which LEFT_OUT in tools/pyodide/archives.py leaves out"
-                    )
+                    raise ModuleNotFoundError(f"{file} imports {name}, which LEFT_OUT in tools/pyodide/archives.py leaves out")
 
 
 def app_archive(out: str, distributions: list[str]) -> dict[str, int]:

@@ -8,7 +8,6 @@ import { endsOf, titleOf } from './list.js';
 import { usesPad } from './number-field.js';
 import { PadPanel } from './pad.js';
 import { ResultView } from './result.js';
-import { ResultDrawings } from './result-drawings.js';
 import { SolverStanding } from './standing.js';
 import { StationFields } from './station.js';
 
@@ -38,9 +37,9 @@ export function CheckScreen({ controller }) {
     ?? state.walk.value.flatMap((one) => one.fields).find((one) => one.path === state.focus.value && one.kind === 'number');
   const pad = state.padUp.value && field && usesPad(controller) ? field : null;
   if (wide) return html`<${WideCheck} controller=${controller} station=${station} pad=${pad} />`;
-  return html`<div class=${`check ${pad ? 'with-pad' : ''} ${pad && state.meansFor.value ? 'asks-means' : ''}`}>
+  return html`<div class=${`check ${pad ? 'with-pad' : ''} ${pad && state.meansFor.value ? 'asks-means' : ''} ${station.path === '/result' ? 'at-result' : ''}`}>
     ${!pad && html`<${TopLine} controller=${controller} />`}
-    ${(pad || !state.screen.value.all) && html`<${WorkingDrawing} controller=${controller} station=${station} strip=${Boolean(pad)} />`}
+    ${(pad || !state.screen.value.all) && html`<${WorkingDrawing} controller=${controller} station=${station} strip=${Boolean(pad) || station.path === '/result'} pickable=${!pad} />`}
     ${pad ? html`<${PadPanel} key=${pad.path} controller=${controller} field=${pad} />`
       : state.screen.value.all ? html`<${AllFields} controller=${controller} station=${station} withResult />`
         : html`<${Walk} controller=${controller} station=${station} /><${OneStation} key=${station.path} controller=${controller} station=${station} />`}
@@ -77,8 +76,8 @@ function TopLine({ controller, wide }) {
   ${state.readOnly.value && html`<p class="standing" role="alert">${state.readOnly.value} <button class="key" onClick=${controller.writeHere}>Write here</button></p>`}`;
 }
 
-/** @param {{controller: Controller, station: Station, strip?: boolean}} props */
-function WorkingDrawing({ controller, station, strip }) {
+/** @param {{controller: Controller, station: Station, strip?: boolean, pickable?: boolean}} props */
+function WorkingDrawing({ controller, station, strip, pickable = true }) {
   const { current, answer, record } = controller.state;
   const drawn = current.value?.drawings?.working ?? answer.value?.result?.drawings?.working;
   const picks = current.value?.picks ?? answer.value?.result?.picks ?? [];
@@ -87,7 +86,7 @@ function WorkingDrawing({ controller, station, strip }) {
     return html`<div class=${strip ? 'drawing drawing-strip drawing-waits' : 'drawing drawing-waits'}><p aria-label="Supports from the left">${names}</p>${!strip && html`<small>The picture is drawn once the solver has read the check.</small>`}</div>`;
   }
   return html`<${Drawing} svg=${drawn} label="Working drawing of the beam" picks=${picks} selected=${selectedPick(picks, controller, station)} strip=${strip} natural
-    onPick=${strip ? undefined : controller.go} />`;
+    onPick=${pickable ? controller.go : undefined} />`;
 }
 
 /** @param {any[]} picks @param {Controller} controller @param {Station} station */
@@ -116,7 +115,7 @@ function Walk({ controller, station }) {
 function OneStation({ controller, station }) {
   const after = controller.state.walk.value[controller.state.walk.value.indexOf(station) + 1];
   return html`<main class="station one-station" aria-label=${station.title}><${SolverStanding} controller=${controller} />
-    ${station.path === '/result' ? html`<${ResultView} controller=${controller} /><${ResultDrawings} controller=${controller} />`
+    ${station.path === '/result' ? html`<${ResultView} controller=${controller} />`
       : html`<${StationFields} controller=${controller} station=${station} />`}
     ${after && html`<button class="key key-on" aria-label=${`On to ${after.title}`} onClick=${() => controller.walk(1)}>On to ${after.title} ›</button>`}</main>`;
 }
@@ -133,7 +132,7 @@ function AllFields({ controller, station, withResult }) {
   return html`<div class="all-fields" role=${withResult ? 'main' : 'form'} aria-label="All fields" ref=${own}><${SolverStanding} controller=${controller} />
     ${controller.state.walk.value.filter((one) => one.path !== '/result').map((one) => html`<section class="station" key=${one.path} id=${sectionId(one.path)} aria-label=${one.title}>
       <h2>${one.title}</h2><${StationFields} controller=${controller} station=${one} /></section>`)}
-    ${withResult && html`<section class="station" id="result" aria-label="Result"><h2>Result</h2><${ResultView} controller=${controller} /><${ResultDrawings} controller=${controller} /></section>`}
+    ${withResult && html`<section class="station" id="result" aria-label="Result"><h2>Result</h2><${ResultView} controller=${controller} /></section>`}
   </div>`;
 }
 

@@ -25,8 +25,7 @@ export function Drawing({ svg, label, picks = [], selected, onPick, strip, natur
     host.innerHTML = svg;
     const drawn = host.querySelector('svg');
     if (!drawn) return;
-    drawn.setAttribute('role', 'img');
-    drawn.setAttribute('aria-label', label);
+    if (!drawn.hasAttribute('aria-labelledby')) { drawn.setAttribute('role', 'img'); drawn.setAttribute('aria-label', label); }
     setBox(drawn.getAttribute('viewBox') ?? '0 0 100 100');
     const { width, height } = drawn.viewBox.baseVal;
     const room = frame.current?.clientWidth ?? width;

@@ -1,5 +1,5 @@
 // How is one measured number written, read back and entered?
-import { useEffect, useRef } from '../vendor/preact-hooks.js';
+import { useEffect, useRef, useState } from '../vendor/preact-hooks.js';
 import { differs } from '../drafts.js';
 import { getAt } from '../pointer.js';
 import { Choices } from './choice.js';
@@ -78,10 +78,15 @@ function ReadBack({ controller, field, waiting }) {
 export function Means({ controller, field, big }) {
   const { state, editing } = controller;
   const draft = editing.draftNow(field);
+  const [open, setOpen] = useState(false);
   const options = state.words.value.vocabulary[`means_${field.means}`] ?? state.words.value.vocabulary.means_load ?? [];
+  const known = options.find((one) => one.id === draft.means);
+  if (known && !big && !open && known.id !== 'stated') {
+    return html`<button class="key key-known" aria-label=${`${field.name}, change how known`} onClick=${() => setOpen(true)}>How known: ${known.label}<small>change</small></button>`;
+  }
   return html`<div class=${big ? 'means means-big' : 'means'}>
     <${Choices} name=${`${field.name}, how known`} legend=${big ? `${field.label}: how is it known?` : 'How known'} options=${options} value=${draft.means ?? null} small=${!big}
-      locked=${Boolean(state.readOnly.value)} onChoose=${(/** @type {string} */ id) => { void controller.means(field, id); }} />
+      locked=${Boolean(state.readOnly.value)} onChoose=${(/** @type {string} */ id) => { setOpen(false); void controller.means(field, id); }} />
     ${draft.means === 'stated' && !big && html`<${Stated} controller=${controller} field=${field} />`}
   </div>`;
 }

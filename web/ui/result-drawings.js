@@ -8,6 +8,6 @@ const SHEETS = [['free_body', 'Free body with reactions'], ['shear', 'Shear'], [
 export function ResultDrawings({ controller, result }) {
   const drawings = (result ?? controller.state.current.value)?.drawings;
   if (!drawings) return null;
-  return html`<section class="sheets" aria-label="Drawings">${SHEETS.map(([key = '', title = '']) => drawings[key] && html`<figure key=${key} class="sheet"><figcaption>${title}</figcaption>
+  return html`<section class="sheets" aria-label="Drawings">${SHEETS.map(([key = '', title = '']) => drawings[key] && html`<figure key=${key} class="sheet"><figcaption class="unseen">${title}</figcaption>
     <${Drawing} svg=${drawings[key]} label=${title} /></figure>`)}</section>`;
 }

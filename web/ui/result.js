@@ -16,14 +16,13 @@ export function ResultView({ controller }) {
     return html`<div class="refusal" role="alert"><p><b>Cannot be judged.</b> ${result.refusal.message}</p>
       ${result.refusal.field && html`<button class="key key-main" onClick=${() => controller.go(result.refusal.field)}>Go to that field</button>`}</div>`;
   }
-  const wide = matchMedia('(min-width: 1000px)').matches;
   return html`<div class="result">
     ${state.typing.value.length > 0 && html`<p class="standing hatched">typing: this result is for the earlier values</p>`}
     <${Verdict} result=${result} onGo=${controller.go} />
     <${Problems} result=${result} controller=${controller} />
+    <${Decision} key=${state.entry.value?.id} controller=${controller} result=${result} />
+    <${ResultDrawings} controller=${controller} />
     <${CriteriaTable} result=${result} /><${ReactionsTable} result=${result} />
-    ${wide && html`<${ResultDrawings} controller=${controller} />`}
-    <${Decision} controller=${controller} result=${result} />
     <button class="key key-main" onClick=${() => controller.show({ name: 'share', id: state.entry.value?.id })}>Share this check</button>
     <${Lists} result=${result} />
   </div>`;

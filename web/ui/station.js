@@ -39,11 +39,19 @@ export function FieldView({ controller, field }) {
     case 'text': case 'long': return html`<${TextField} controller=${controller} field=${field} value=${value ?? ''} locked=${locked} />`;
     case 'choice': return html`<${ChoiceField} controller=${controller} field=${field} value=${value} locked=${locked} />`;
     case 'many': return html`<div class="field"><${Marks} name=${field.name} legend=${field.label} options=${field.options} value=${value ?? []} locked=${locked} onMark=${(/** @type {string} */ id, /** @type {boolean} */ on) => { void editing.mark(field, id, on); }} /></div>`;
-    case 'heading': return html`<h3>${field.label}</h3>`;
+    case 'heading': return html`<${Heading} controller=${controller} field=${field} />`;
     case 'note': return html`<p class="note">${field.label}</p>`;
     case 'photo': return html`<${PhotoField} controller=${controller} field=${field} />`;
     default: return html`<button class=${field.removes ? 'key key-remove' : 'key key-add'} aria-label=${field.name} disabled=${locked} onClick=${() => { void controller.act(field); }}>${field.label}${field.help && html`<small>${field.help}</small>`}</button>`;
   }
+}
+
+/** @param {{controller: Controller, field: Field}} props */
+function Heading({ controller, field }) {
+  const own = useRef(/** @type {HTMLHeadingElement|null} */ (null));
+  const wanted = controller.state.focus.value === field.path;
+  useEffect(() => { if (wanted) { own.current?.focus({ preventScroll: true }); own.current?.scrollIntoView({ block: 'center' }); } }, [wanted]);
+  return html`<h3 ref=${own} tabindex="-1">${field.label}</h3>`;
 }
 
 /** @param {{controller: Controller, field: Field, value: any, locked: boolean}} props */
