@@ -72,8 +72,9 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
     end = valid_until(record["found_at"], record["valid_until"])
     until = end.strftime("%H:%M") if end else "the end of this shift"
     first = f"as found earlier, look again. It was: {decided.title}" if old else decided.title
+    memory = "; factors from memory" if decided.from_memory else ""
     return {"word": decided.word, "title": decided.title, "reasons": list(decided.reasons),
-            "lines": [first, bar_numbers(decided.leading), what_now(decided, until)],
+            "lines": [first, bar_numbers(decided.leading) + memory, what_now(decided, until)],
             "rules_out": ", ".join(_decision_label(d) for d in ruled_out(decided)) or "nothing",
             "missing": [{"text": g.text, "who": g.who, "path": g.path} for g in decided.gaps],
             "treated_as_over": decided.treated_as_over, "lapsed": old,
@@ -244,9 +245,12 @@ def numbers(result: Result) -> dict[str, float]:
         told[f"reaction N:{result.record['supports'][j]['name']}"] = float(result.response.reactions[i])
     for quantity, unit in (("shear", "N"), ("moment", "N·m"), *((("sag", "m"),) if _sag_known(result) else ())):
         top, bottom = extremes(result.response, quantity)
-        told[f"{quantity} {unit}:largest"], told[f"{quantity} {unit}:smallest"] = top.value, bottom.value
+        told[f"{quantity} {unit}:largest"] = top.value
+        if quantity != "sag":
+            told[f"{quantity} {unit}:smallest"] = bottom.value
     for i, one in enumerate(result.compared):
-        for name, value in (("ratio", one.ratio), ("ratio_high", one.high)):
+        best = None if one.kind in ("reaction", "hold_down") else one.ratio  # a link is short: the worst is enough there
+        for name, value in (("ratio", best), ("ratio_high", one.high)):
             if value is not None and math.isfinite(value):
                 told[f"{name}:{i + 1} {one.title}"] = value
     return told

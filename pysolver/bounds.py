@@ -58,7 +58,8 @@ def search(evaluate: Evaluate, low: Floats, best: Floats, high: Floats) -> Searc
 def _starts(low: Floats, best: Floats, high: Floats) -> Floats:
     n = len(low)
     levels = [[a, 0.5 * (a + b), b] if n <= FULL_GRID else [a, b] for a, b in zip(low, high, strict=True)]
-    corners = np.array(list(product(*levels))).reshape(-1, n)
+    chosen = list(product(*levels))
+    corners = np.array(chosen).reshape(len(chosen), n)
     middles = np.tile(best, (n, 1))
     middles[np.arange(n), np.arange(n)] = 0.5 * (low + high)
     return np.concatenate([best[None, :], corners, middles])

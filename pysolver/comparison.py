@@ -73,7 +73,11 @@ def factor_ranges(one: Judged, sources: Sequence[Source], *, best: bool) -> tupl
 
 def compare(along: Along, one: Judged, sources: Sequence[Source], *, best: bool) -> Worst:
     """The worst ratio of one criterion in each layout: with sources at best, or anywhere in their ranges."""
-    low, high = factor_ranges(one, sources, best=best)
+    return ratio_of(along, one, *factor_ranges(one, sources, best=best))
+
+
+def ratio_of(along: Along, one: Judged, low: Floats, high: Floats) -> Worst:
+    """The worst ratio of one criterion with factors (K, S) between low and high."""
     kind = one.criterion.kind
     if kind in ("reaction", "hold_down"):
         return _compare_reaction(along, one, low, high)

@@ -53,7 +53,7 @@ def free_body(record: Record, layout: Layout, response: Response, system: System
              draw_loads(loads, y - BEAM / 2, WIDTH).markup,
              symbols.beam(scale.left, scale.right, y, [scale.x(x) for x in layout.beam.hinges]),
              *(symbols.hinge(scale.x(x), y) for x in layout.beam.hinges),
-             _fixing(response, layout, scale, y, system), reactions, dimensions]
+             _fixing(response, layout, scale, y), reactions, dimensions]
     names = ", ".join(f"{record['supports'][j]['name']} {show('force', float(r), system)}"
                       for j, r in zip(layout.real, response.reactions, strict=True))
     return svg.document(WIDTH, foot, parts, name="free-body", title="Free body of the beam with its reactions",
@@ -84,8 +84,9 @@ def _reactions(record: Record, layout: Layout, response: Response, scale: TrueSc
                system: System) -> tuple[str, float]:
     """The reactions with their values in as many rows as they need, and the depth they take."""
     xs = [scale.x(layout.supports[j]) for j in layout.real]
-    words = [f"{svg.clean(record['supports'][j]['name'], 9)} {show('force', float(r), system)}"
-             for j, r in zip(layout.real, response.reactions, strict=True)]
+    largest = _largest_fixing(response)
+    words = [f"{svg.clean(record['supports'][j]['name'], 9)} {_given(float(r), float(m), largest, system)}"
+             for j, r, m in zip(layout.real, response.reactions, response.fixing_moments, strict=True)]
     halves = [width_of(one) / 2 + 4 for one in words]
     middles = [min(max(x, half), WIDTH - half) for x, half in zip(xs, halves, strict=True)]
     levels = rows([(m - half, m + half) for m, half in zip(middles, halves, strict=True)])
@@ -111,19 +112,26 @@ def _leader(x: float, top: float, left: Sequence[float], right: Sequence[float],
                    for k in open_rows)
 
 
-def _fixing(response: Response, layout: Layout, scale: TrueScale, y: float, system: System) -> str:
-    """Curved arrows at the supports that hold the beam against turning; the value stands beside the arrow below."""
-    largest = max([abs(float(m)) for m in response.fixing_moments] + [1.0])
+def _given(force: float, moment: float, largest: float, system: System) -> str:
+    """What a support gives: its reaction and, where it holds the beam against turning, the size of that moment."""
+    turning = f", {show('moment', abs(moment), system)}" if abs(moment) > NOTHING * largest else ""
+    return show("force", force, system) + turning
+
+
+def _largest_fixing(response: Response) -> float:
+    return max(1.0, float(abs(response.fixing_moments).max(initial=0.0)))
+
+
+def _fixing(response: Response, layout: Layout, scale: TrueScale, y: float) -> str:
+    """Curved arrows at the supports that hold the beam against turning; the value stands with the reaction."""
+    largest = _largest_fixing(response)
     parts = []
     for j, moment in zip(layout.real, response.fixing_moments, strict=True):
         if abs(float(moment)) <= NOTHING * largest:
             continue
         x = scale.x(layout.supports[j])
-        words = show("moment", abs(float(moment)), system)
-        at_right = x + 18 + width_of(words) < WIDTH - 4
         parts.append(svg.path(symbols.curved_arrow(x, y, 15, clockwise=float(moment) > 0), "reaction", fill="none",
                               stroke_width="2"))
-        parts.append(svg.text(x + (19 if at_right else -19), y + 19, words, anchor="start" if at_right else "end"))
     return "".join(parts)
 
 

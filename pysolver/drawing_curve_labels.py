@@ -15,7 +15,7 @@ from pysolver import piecewise, svg
 from pysolver.display import System, show
 from pysolver.drawing_body import WIDTH, TrueScale
 from pysolver.drawing_labels import Box, Place, Sheet, rows, width_of
-from pysolver.drawing_symbols import name
+from pysolver.drawing_symbols import name, name_half
 from pysolver.found import Layout
 from pysolver.piecewise import Floats
 
@@ -68,17 +68,20 @@ def base_line(figure: Figure, layout: Layout, names: Sequence[str]) -> str:
     y = figure.base
     parts = [svg.line(figure.x(0.0) - 6, y, figure.x(layout.beam.length) + 6, y, "axis", stroke_width="1.2")]
     xs = [figure.x(layout.supports[j]) for j in layout.real]
-    for j, x, support, row in zip(layout.real, xs, layout.beam.supports, name_rows(xs), strict=True):
+    for j, x, support, row in zip(layout.real, xs, layout.beam.supports, name_rows(figure, layout, names), strict=True):
         foot = figure.bottom + 12 + NAME_ROW * row
         parts.append(svg.line(x, y, x, foot - 11, "dim", stroke_width="0.4", stroke_dasharray="1 3"))
         parts.append(_foot_mark(x, y, support.kind == "fixed", -8.0 if x < WIDTH / 2 else 0.0))
-        parts.append(name(x, foot, svg.clean(names[j], 4)))
+        half = name_half(svg.clean(names[j]))
+        parts.append(name(min(max(x, half + 2), WIDTH - half - 2), foot, svg.clean(names[j])))
     return "".join(parts)
 
 
-def name_rows(xs: Sequence[float]) -> list[int]:
-    """In which row each name stands so that their circles stay apart."""
-    return rows([(x - 11.5, x + 11.5) for x in xs])
+def name_rows(figure: Figure, layout: Layout, names: Sequence[str]) -> list[int]:
+    """In which row each name stands so that they keep apart."""
+    places = [(figure.x(layout.supports[j]), name_half(svg.clean(names[j])) + 1) for j in layout.real]
+    middles = [(min(max(x, half + 1), WIDTH - half - 1), half) for x, half in places]
+    return rows([(x - half, x + half) for x, half in middles])
 
 
 def _foot_mark(x: float, y: float, fixed: bool, left: float) -> str:

@@ -31,6 +31,7 @@ TALL = 190.0  # of the plot
 HEADING = 46.0
 AIR = 22.0  # over and under the plot, for values and names
 RESIDUE = 1e-9
+NO_FORCE = 1e-6  # N, N·m
 FAR = 3.0  # a rail farther out than this many times the curve is named, not drawn
 DOWN = {"shear": -1.0, "moment": 1.0, "sag": 1.0}  # the way of positive values on the paper (y runs down)
 DIMENSION = {"shear": "force", "moment": "moment", "sag": "small_length"}
@@ -82,7 +83,7 @@ def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Seque
              *(_worst(figure, edge) for edge in edges), *(_rail(figure, one) for one in near),
              base_line(figure, layout, names), _best(figure, pieces), *(_ring(figure, one) for one in governing),
              labels.markup]
-    foot = figure.bottom + 30.0 + NAME_ROW * max(name_rows([figure.x(layout.supports[j]) for j in layout.real]))
+    foot = figure.bottom + 30.0 + NAME_ROW * max(name_rows(figure, layout, names))
     parts += [svg.text(10, foot + 14 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL)
               for k, note in enumerate(notes)]
     return svg.document(WIDTH, foot + 14 * len(notes) + 8, parts, name=quantity,
@@ -93,12 +94,14 @@ def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Seque
 def residue(quantity: Quantity, response: Response, layout: Layout) -> float:
     """Magnitudes up to this are rounding residues of the solver: not drawn as a curve, not written as a value.
 
-    Own rule: 1e-9 of the forces, for a moment times the length of the beam; a nanometre for sag.
+    Own rule: 1e-9 of the forces, for a moment times the length of the beam, and never less than a millionth of a newton
+    (loads that cancel leave no force to compare with); a nanometre for sag.
     """
     length = layout.beam.length
     forces = float(np.abs(response.reactions).sum() + np.abs(response.shear[:, 0]).max(initial=0.0)
                    + np.abs(response.moment[:, 0]).max(initial=0.0) / length)
-    return {"shear": RESIDUE * forces, "moment": RESIDUE * forces * length, "sag": RESIDUE}[quantity]
+    return {"shear": max(RESIDUE * forces, NO_FORCE), "moment": max(RESIDUE * forces * length, NO_FORCE),
+            "sag": RESIDUE}[quantity]
 
 
 def best_pieces(quantity: Quantity, response: Response, layout: Layout) -> list[Piece]:

@@ -84,13 +84,23 @@ def _spiral(x: float, y: float) -> str:
 
 def name(x: float, y: float, words: str) -> str:
     """A name in a circle; a longer one in a box with round ends."""
-    short = words.strip() or "?"
+    short = _short(words)
     if len(short) <= 2:
         return circle(x, y, 10.5, "axis", stroke_width="1.2", fill="none") + text(x, y + 5, short, "name", size=14)
-    short = short if len(short) <= 9 else short[:8] + "…"
-    half = 5.0 * len(short) + 5
+    half = name_half(words)
     return (rect(x - half, y - 10.5, 2 * half, 21, "axis", rx="10.5", stroke_width="1.2", fill="none")
             + text(x, y + 5, short, "name", size=14))
+
+
+def _short(words: str) -> str:
+    short = words.strip() or "?"
+    return short if len(short) <= 9 else short[:8] + "…"
+
+
+def name_half(words: str) -> float:
+    """Half the width of a name in its circle or box."""
+    short = _short(words)
+    return 10.5 if len(short) <= 2 else 5.0 * len(short) + 5
 
 
 def beam(left: float, right: float, y: float, hinges: Sequence[float]) -> str:

@@ -6,7 +6,7 @@ criterion becomes one Compared with places in words. Effects in SI, signs as in 
 
 import math
 from collections.abc import Sequence
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 
 import numpy as np
 from numpy.typing import NDArray
@@ -14,10 +14,11 @@ from numpy.typing import NDArray
 from pysolver import piecewise
 from pysolver.bounds import most_telling, search
 from pysolver.combinations import Case
-from pysolver.comparison import Along, Judged, chunks, compare, factor_ranges, from_chord, smallest_reactions
+from pysolver.comparison import Along, Judged, chunks, compare, factor_ranges, ratio_of, smallest_reactions
 from pysolver.envelope import Worst
 from pysolver.facts import Gap
-from pysolver.found import Layout, Reading, span_name
+from pysolver.found import Layout, span_name
+from pysolver.frame import Reading
 from pysolver.model import Model
 from pysolver.outcome import Compared
 from pysolver.record import Record
@@ -29,7 +30,7 @@ LIFTS = 1e-9  # share of the load below which a negative reaction is rounding
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Governed:
-    """compared: one entry per criterion; lifts: least reaction per bearing, worst case (share of load, by record index);
+    """compared: one entry per criterion; least: least reaction of each support, worst case (share of the load, by index);
     varied, not_varied: paths of uncertain lengths and positions."""
 
     compared: tuple[Compared, ...]
@@ -65,7 +66,7 @@ class _At:
 
 
 def _loose(way: Reading) -> Reading:
-    return Reading(rule=way.rule, edges=way.edges, strict=False)
+    return replace(way, strict=False)
 
 
 def _worst_way(model: Model, one: Judged, solved: dict[Reading, Along], *, best_only: bool) -> _At:
@@ -74,12 +75,12 @@ def _worst_way(model: Model, one: Judged, solved: dict[Reading, Along], *, best_
 
 
 class _Search:
-    """The search over the box: worst ratios of all criteria, and least reactions of all bearings, together."""
+    """The search over the box: worst ratios of all criteria, and least reactions of all supports, together."""
 
     def __init__(self, model: Model, best: Along) -> None:
         self.model, self.size = model, total_load(best)
         self.step = chunks(10**6, best)
-        self.bearings = [j for j in best.layouts[0].real if model.record["supports"][j]["kind"] == "bearing"]
+        self.supports = best.layouts[0].real
         low, high = (np.array([getattr(model.readings.measured[v], end) for v in model.variables]) for end in ("low", "high"))
         point = model.best_point()
         used = most_telling(self.evaluate, low, point, high)
@@ -89,7 +90,7 @@ class _Search:
         self.not_varied = tuple(v for i, v in enumerate(model.variables) if i not in used)
         self.points = found[1][:len(model.judged)]
         lifts = found[0][len(model.judged):]
-        self.least = {j: -float(v) for j, v in zip(self.bearings, lifts, strict=True)}
+        self.least = {j: -float(v) for j, v in zip(self.supports, lifts, strict=True)}
 
     def _search(self, low: Floats, point: Floats, high: Floats, used: list[int]) -> tuple[Floats, Floats]:
         def widened(p: Floats) -> Floats:
@@ -101,7 +102,7 @@ class _Search:
         return found.worst, widened(found.points)
 
     def evaluate(self, points: Floats) -> Floats:
-        """(C, K + bearings): the worst ratio of each criterion, then the uplift of each bearing as a share of the load."""
+        """(C, K + J): the worst ratio of each criterion, then the uplift at each support as a share of the load."""
         rows = [self._chunk(points[i:i + self.step]) for i in range(0, len(points), self.step)]
         return np.concatenate(rows)
 
@@ -110,7 +111,7 @@ class _Search:
         for way in self.model.ways:
             along = self.model.solved(points, _loose(way))
             columns = [compare(along, one, self.model.sources, best=False).ratio for one in self.model.judged]
-            lifts = [-least_reaction(along, self.model, j, best=False) / self.size for j in self.bearings]
+            lifts = [-least_reaction(along, self.model, j, best=False) / self.size for j in self.supports]
             ways.append(np.stack([*columns, *lifts], axis=1) if columns or lifts else np.zeros((len(points), 0)))
         worst: Floats = np.max(ways, axis=0)
         return worst
@@ -147,12 +148,14 @@ def _compared(model: Model, one: Judged, best: _At, worst: _At | None, gaps: Seq
                                             and (sheet["basis"] == "unfactored" or sheet["set"] is not None))
     x, ratio = _x(best), float(best.worst.ratio[0])
     unfactored, low = _at_place(model, one, best)
+    covered = np.array([one.covered], dtype=float)
     top = worst or best
     return Compared(
         kind=criterion.kind, sheet=criterion.sheet, kind_of_limit=sheet["kind"], basis=sheet["basis"],
         support=model.record["supports"][criterion.support]["name"] if criterion.support >= 0 else None,
         place=place_name(model.record, best.along.layouts[0], x, criterion.support), x=x, unfactored=unfactored,
-        factored=float(best.worst.effect[0]), worst=float(top.worst.effect[0]),
+        bare=float(ratio_of(best.along, one, covered, covered).ratio[0]), factored=float(best.worst.effect[0]),
+        worst=float(top.worst.effect[0]),
         capacity=_capacity(best, ratio, one), ratio=ratio if has_ratio else None, low=low if has_ratio else None,
         high=float(worst.worst.ratio[0]) if has_ratio and worst else None, case=one.cases[int(best.worst.case[0])].name,
         searched=searched, worst_place=place_name(model.record, top.along.layouts[0], _x(top), criterion.support),
@@ -178,9 +181,8 @@ def _at_place(model: Model, one: Judged, at: _At) -> tuple[float, float]:
         j = at.along.layouts[0].real.index(one.criterion.support)
         values = at.along.batch.reactions[0, j]
     else:
-        coefficients = from_chord(at.along) if kind == "sag" else getattr(
-            at.along.batch, "shear" if kind == "shear" else "moment")
-        values = piecewise.evaluate(coefficients[0, piece], s)
+        name = kind if kind in ("sag", "shear") else "moment"
+        values = piecewise.evaluate(at.along.influence(name).coefficients[0, piece], s)
     covered = np.array(one.covered, dtype=float)
     sign = -1.0 if kind in ("hogging", "hold_down") or (kind == "shear" and at.worst.effect[0] < 0) else 1.0
     low, high = (r[int(at.worst.case[0])] for r in factor_ranges(one, model.sources, best=False))
@@ -214,12 +216,13 @@ def infinite_hold_down(model: Model, best: Along, least_worst: dict[int, float])
         support = model.record["supports"][j]
         if support["kind"] == "bearing" or j in given:
             continue
+        size = total_load(best)
         at_best = float(least_reaction(best, model, j, best=True)[0])
-        at_worst = least_worst.get(j, at_best)
-        if at_worst < -LIFTS * total_load(best):
+        at_worst = min(size * least_worst.get(j, 0.0), at_best)
+        if at_worst < -LIFTS * size:
             made.append(Compared(
                 kind="hold_down", sheet=0, support=support["name"], kind_of_limit=None, basis=None,
                 place=f"at {support['name']}", x=best.layouts[0].supports[j], unfactored=max(-at_best, 0.0),
-                factored=max(-at_best, 0.0), worst=-at_worst, capacity=0.0, ratio=math.inf if at_best < 0 else 0.0, low=0.0,
+                bare=0.0, factored=max(-at_best, 0.0), worst=-at_worst, capacity=0.0, ratio=math.inf if at_best < -LIFTS * size else 0.0, low=0.0,
                 high=math.inf, case="", searched=False, worst_place=f"at {support['name']}"))
     return made

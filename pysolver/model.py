@@ -15,7 +15,8 @@ from pysolver.combinations import PERMANENT, SETTLED, CombinationSet, Source, ow
 from pysolver.comparison import Along, Judged, judged, solve_layouts
 from pysolver.errors import InputError
 from pysolver.facts import wrong_pairs
-from pysolver.found import SELF_WEIGHT, Layout, Reading, lay_out, source_of
+from pysolver.found import SELF_WEIGHT, Layout, lay_out, source_of
+from pysolver.frame import Reading
 from pysolver.limits import Criterion, criteria, set_of
 from pysolver.readings import Readings
 from pysolver.record import Record
@@ -61,23 +62,22 @@ class Model:
 def model(record: Record, readings: Readings) -> Model:
     """The check made ready. Raises InputError when the beam cannot stand as entered."""
     way = Reading(rule=span_rule(record))
-    best = lay_out(record, readings, {p: m.best for p, m in readings.measured.items()}.__getitem__, way)
+    best = _at_best(record, readings, way)
     along = solve_layouts([best])
     sources = _sources(record, readings, along.batch.sources, best)
     found, errors = criteria(record, readings)
     pairs = wrong_pairs(record)
     usable = [c for c in found if _usable(c, record, readings, best, pairs)]
     ways = [way]
-    if along.layouts[0].faces and any(record["overhangs"].values()):
-        edged = replace(way, edges=True)
-        ways += [edged] if lay_out_differs(record, readings, best, edged) else []
+    if any(record["overhangs"].values()):
+        edged = [replace(way, edge=edge) for edge in ("tip", "inner")]
+        ways += [other for other in edged if _at_best(record, readings, other).supports != best.supports]
     return Model(record=record, readings=readings, sources=sources, variables=_variables(record, readings, usable),
                  judged=tuple(_judge(c, record, sources) for c in usable), ways=tuple(ways), errors=(*errors, *pairs))
 
 
-def lay_out_differs(record: Record, readings: Readings, best: Layout, way: Reading) -> bool:
-    other = lay_out(record, readings, {p: m.best for p, m in readings.measured.items()}.__getitem__, way)
-    return other.supports != best.supports
+def _at_best(record: Record, readings: Readings, way: Reading) -> Layout:
+    return lay_out(record, readings, {p: m.best for p, m in readings.measured.items()}.__getitem__, way)
 
 
 def span_rule(record: Record) -> str:

@@ -21,7 +21,12 @@ TITLE = {"sagging": "Bending, sagging", "hogging": "Bending, hogging", "shear": 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Compared:
-    """One criterion with its numbers. best, high: ratios (None: basis or coverage allow none). x in m. effects in SI."""
+    """One criterion with its numbers. x in m, effects in SI.
+
+    unfactored, factored: effects at best estimate at the governing place; worst: of the whole box; bare: the ratio of the
+    unfactored best estimate where that is largest; ratio, low, high: of best estimate, at the relieving ends of the loads,
+    of the box (None: basis or coverage allow none, or not worked out yet).
+    """
 
     kind: str
     sheet: int
@@ -31,6 +36,7 @@ class Compared:
     place: str
     x: float
     unfactored: float
+    bare: float
     factored: float
     worst: float
     capacity: float
@@ -54,7 +60,7 @@ class Compared:
     @property
     def over_either_way(self) -> bool:
         """J4: without a basis there is no ratio, but the unfactored effect alone may exceed the figure."""
-        return self.ratio is None and abs(self.unfactored) > self.capacity
+        return self.ratio is None and self.bare > 1.0
 
 
 def state(one: Compared) -> str:
@@ -79,7 +85,7 @@ def numbers_over(one: Compared) -> bool:
 def beyond_resistance(one: Compared) -> bool:
     """J23: the unfactored best estimate above a factored resistance."""
     return (one.kind_of_limit == "resistance" and one.basis == "factored" and one.kind != "sag"
-            and abs(one.unfactored) > one.capacity)
+            and one.bare > 1.0)
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -92,6 +98,7 @@ class Outcome:
     gaps: tuple[Gap, ...]
     treated_as_over: bool
     leading: Compared | None
+    from_memory: bool
 
 
 def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: bool, uncovered: Sequence[Gap],
@@ -104,8 +111,9 @@ def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: boo
     memory = ("The factors of this set are from memory: check them against the standard.",) if from_memory else ()
 
     def made(word: str, title: str, reasons: Sequence[str], treated: bool = False) -> Outcome:
+        title = title if word == CLEAR else title + sag_words(compared)
         return Outcome(word=word, title=title, reasons=(*reasons, *memory), gaps=every_gap, treated_as_over=treated,
-                       leading=leading)
+                       leading=leading, from_memory=from_memory)
 
     if distressed:
         return made(CLEAR, "clear the area: distress was seen", ["Distress overrides the numbers."], True)
@@ -129,6 +137,12 @@ def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: boo
         title = "close: ranges not stated" if unranged else f"close to the entered limits: {named(near)}"
         return made(CLOSE, title, [close_reason(c) for c in near])
     return made(WITHIN, f"within the entered limits: {named(strength)}", [])
+
+
+def sag_words(compared: Sequence[Compared]) -> str:
+    """What is said of sag, apart from strength: "" when it is within or not compared."""
+    states = {state(c) for c in compared if c.kind == "sag"}
+    return "; sag over" if OVER in states else "; sag close" if CLOSE in states else ""
 
 
 def named(compared: Sequence[Compared]) -> str:

@@ -27,7 +27,7 @@ def validated(document: Any) -> Record:
         raise InputError(code="version", field="/version", message=f"This record has version {document.get('version')!r}; "
                          f"this app reads version {VERSION}. Open it with the app that made it, or update this one.")
     try:
-        record: Record = validate(document)
+        record: Record = validate(document)  # type: ignore[no-untyped-call]
     except JsonSchemaValueException as error:
         raise _not_a_record(error.message) from None
     _check_references(record)
@@ -37,6 +37,8 @@ def validated(document: Any) -> Record:
 def _not_a_record(message: str) -> InputError:
     found = _PLACE.match(message)
     path, complaint = (found[1], found[2]) if found else ("", message)
+    if complaint.startswith("must contain ."):
+        complaint = "lacks a part that it must have"
     field = "/" + re.sub(r"[.\[]", "/", path).replace("]", "").strip("/")
     return InputError(code="schema", field=field, message=f"The record is not in the form that this app reads: {field} "
                       f"{complaint[:200]}. Export or send it again from the app that made it.")

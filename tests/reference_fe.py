@@ -10,6 +10,7 @@ SI units and signs as in pysolver.statics. pysolver's Beam and loads are read as
 """
 
 from dataclasses import dataclass
+from itertools import pairwise
 
 import numpy as np
 from numpy.typing import NDArray
@@ -90,7 +91,7 @@ def _mesh(beam, loads):
     cuts = [0.0, beam.length, *supports, *beam.hinges, *(load.x for load in _concentrated(loads))]
     cuts += [end for piece in (*beam.stretches, *_lines(loads)) for end in (piece.start, piece.end)]
     bounds = sorted({0.0, *supports, beam.length})
-    for left, right in zip(bounds, bounds[1:], strict=False):
+    for left, right in pairwise(bounds):
         between = np.linspace(left, right, ELEMENTS_A_SPAN + 1)[1:-1]
         cuts += [x for x in between if np.abs(x - cuts).min() > SAME_PLACE]  # a given place stays as it was given
     cuts = np.sort(np.clip(cuts, 0.0, beam.length))

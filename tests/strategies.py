@@ -7,6 +7,7 @@ changes of stiffness and each other. Only stable beams come out (rank of the rig
 
 import random
 from dataclasses import replace
+from itertools import pairwise
 
 import numpy as np
 from hypothesis import strategies as st
@@ -50,7 +51,7 @@ def random_stretches(rng: random.Random, whole: int, grid: int) -> tuple[Stretch
     cuts = sorted({rng.randint(1, whole - 1) for _ in range(rng.choice([0, 0, 1, 2, 4]))})
     edges = [0, *cuts, whole]
     return tuple(Stretch(start=a / grid, end=b / grid, bending_stiffness=1e6 * rng.randint(2, 100))
-                 for a, b in zip(edges, edges[1:], strict=False))
+                 for a, b in pairwise(edges))
 
 
 def with_hinges(rng: random.Random, beam: Beam, whole: int, grid: int) -> Beam:

@@ -1,13 +1,15 @@
 """Do the drawings show what was solved and what was entered, whatever was entered?
 
-Curves are held against the polynomials themselves (numpy.polynomial), control points against the de Casteljau rule worked
-out here, markup against the XML parser of the standard library. Beams are built from an empty record.
+Curves are held against the polynomials themselves (numpy.polynomial), control points against the de Casteljau rule
+worked out here, markup against the XML parser of the standard library. Beams are built from an empty record.
 """
 
 import json
 import math
 import re
 import xml.etree.ElementTree as ET
+from collections.abc import Sequence
+from itertools import pairwise
 from typing import Any
 
 import numpy as np
@@ -42,10 +44,11 @@ def load(number: int, form: str | None, magnitude: str | None, position: Any = N
             "length": None, "whole_beam": False, "source": "", "removable": None, "note": "", "photos": [], **other}
 
 
-def record_of(lengths: list[str | None], kinds: list[str | None], loads: list[Any] | None = None,
+def record_of(lengths: Sequence[str | None], kinds: Sequence[str | None], loads: list[Any] | None = None,
               hinges: list[Any] | None = None, right: str | None = None) -> Record:
     record = blank()
-    record["spans"] = [{"measure": "centres", "length": written(one, "m") if one else None, "drawn": None} for one in lengths]
+    record["spans"] = [{"measure": "centres", "length": written(one, "m") if one else None, "drawn": None}
+                       for one in lengths]
     record["supports"] = [blank_support(i) | {"kind": kind} for i, kind in enumerate(kinds)]
     for one in record["supports"]:
         if one["kind"] == "spring":
@@ -74,13 +77,13 @@ def varied() -> Record:
 
 def twelve() -> Record:
     forms = ["point", "line", "point", "moment"]
-    loads = [load(i, forms[i % 4], str(3 + i % 7), at(i % 12, "right", f"{0.7 + 0.3 * (i % 8):.2f}"), length=written("0.9", "m"))
-             for i in range(40)]
+    loads = [load(i, forms[i % 4], str(3 + i % 7), at(i % 12, "right", f"{0.7 + 0.3 * (i % 8):.2f}"),
+                  length=written("0.9", "m")) for i in range(40)]
     return record_of(["4.0"] * 5 + ["6.0"] + ["3.2"] * 6, ["bearing"] * 6 + ["pinned"] + ["bearing"] * 6, loads)
 
 
-def curve(quantity: drawing_curves.Quantity, record: Record, rails: list[Rail] | None = None, marks: list[Mark] | None = None,
-          worst: float | None = None) -> str:
+def curve(quantity: drawing_curves.Quantity, record: Record, rails: list[Rail] | None = None,
+          marks: list[Mark] | None = None, worst: float | None = None) -> str:
     _, layout, response = solved(record)
     high = [(a, b, worst * c) for a, b, c in drawing_curves.best_pieces(quantity, response, layout)] if worst else None
     return drawing.curve(quantity, response, layout, high=high, low=None, rails=rails or [], governing=marks or [],
@@ -121,7 +124,7 @@ def beziers(data: str) -> list[tuple[tuple[float, float], ...]]:
 def de_casteljau(ordinates: Any, t: float) -> float:
     points = list(ordinates)
     while len(points) > 1:
-        points = [(1 - t) * a + t * b for a, b in zip(points, points[1:], strict=False)]
+        points = [(1 - t) * a + t * b for a, b in pairwise(points)]
     return float(points[0])
 
 
@@ -176,8 +179,8 @@ def test_the_drawn_curve_is_the_solved_polynomial_everywhere(quantity: drawing_c
                for piece in drawn if piece[3][0] - piece[0][0] > 0.5 for t in (0.11, 0.37, 0.5, 0.83)]
     y, v = np.array([s[0] for s in samples]), np.array([exact(s[1]) for s in samples])
     slope, base = np.polyfit(v, y, 1)
-    steep = 0.002 * abs(slope) * metres * max(abs(polynomial.polyval(np.linspace(0, b - a, 9), polynomial.polyder(c))).max()
-                                             for a, b, c in pieces)
+    steepest = max(abs(polynomial.polyval(np.linspace(0, b - a, 9), polynomial.polyder(c))).max() for a, b, c in pieces)
+    steep = 0.002 * abs(slope) * metres * steepest
     assert np.abs(base + slope * v - y).max() <= allowed + steep
     assert (slope < 0) == (quantity == "shear"), "shear up, sagging and sag down"
 
@@ -185,7 +188,8 @@ def test_the_drawn_curve_is_the_solved_polynomial_everywhere(quantity: drawing_c
 def test_jumps_of_shear_and_moment_are_upright_strokes() -> None:
     record = record_of(["4.0"], ["bearing", "pinned"], [load(1, "point", "10", at(0, "right", "1.0")),
                                                         load(2, "moment", "6", at(0, "right", "3.0"))])
-    for quantity, place in (("shear", 1.0), ("moment", 3.0)):
+    places: tuple[tuple[drawing_curves.Quantity, float], ...] = (("shear", 1.0), ("moment", 3.0))
+    for quantity, place in places:
         data = path_of(curve(quantity, record), "curve")
         points = [(float(a), float(b)) for a, b in re.findall(rf"[ML]({NUMBER}) ({NUMBER})", data)]
         ends = [p[3] for p in beziers(data)]
@@ -222,13 +226,18 @@ def test_the_worst_case_is_a_second_curve_at_its_own_height() -> None:
     record = record_of(["4.0"], ["bearing", "pinned"], [load(1, "point", "10", at(0, "right", "2.0"))])
     markup = curve("moment", record, worst=1.5)
     base = next(float(e.attrib["y1"]) for e in parsed(markup).iter(f"{SVG}line") if e.attrib.get("class") == "axis")
-    depth = {name: max(y for piece in beziers(path_of(markup, name)) for _, y in piece) - base for name in ("curve", "curve-high")}
+    depth = {name: max(y for piece in beziers(path_of(markup, name)) for _, y in piece) - base
+             for name in ("curve", "curve-high")}
     assert depth["curve-high"] == pytest.approx(1.5 * depth["curve"], rel=1e-3)
 
 
 def test_a_beam_without_any_moment_gets_a_straight_line_and_no_values_of_rounding_residues() -> None:
-    over_support = record_of(["4.0", "3.0"], ["bearing", "bearing", "pinned"], [load(1, "point", "10", at(1, "right", "0"))])
-    for record in (record_of(["4.0"], ["bearing", "pinned"]), over_support):
+    cancelling = [load(i, "line", amount, whole_beam=True) for i, amount in enumerate(("0.1", "0.2", "-0.3"))]
+    over_support = load(9, "point", "13.7", at(1, "right", "0"))
+    beams = [record_of(["4.0"], ["bearing", "pinned"]), record_of(["3.7"], ["bearing", "pinned"], cancelling),
+             record_of(["3.7", "2.2"], ["bearing", "bearing", "pinned"], [*cancelling, over_support])]
+    assert 0.0 < np.abs(solved(beams[1])[2].moment).max() < 1e-9, "the floats 0.1 + 0.2 - 0.3 leave a residue"
+    for record in beams:
         markup = curve("moment", record)
         assert len({y for piece in beziers(path_of(markup, "curve")) for _, y in piece}) == 1
         assert "no moment under these loads" in texts(markup)
@@ -252,11 +261,15 @@ def paths_of(record: Record) -> set[str]:
                                  for i in range(len(record[name])))}
 
 
-@pytest.mark.parametrize("make", [blank, varied, twelve], ids=["blank", "varied", "twelve spans, forty loads"])
+def two_hinges_in_one_place() -> Record:
+    return record_of(["4.0", "3.0"], ["bearing", "bearing", None], hinges=[at(0, "right", "2.0")] * 2)
+
+
+@pytest.mark.parametrize("make", [blank, varied, twelve, two_hinges_in_one_place])
 @pytest.mark.parametrize("with_layout", [True, False])
 def test_every_thing_of_the_record_can_be_picked_inside_the_drawing(make: Any, with_layout: bool) -> None:
     record = make()
-    layout = solved(record)[1] if with_layout and record["spans"][0]["length"] else None
+    layout = solved(record)[1] if with_layout and make in (varied, twelve) else None
     made = drawing.working(record, layout, read_all(record))
     box = [float(n) for n in parsed(made.svg).attrib["viewBox"].split()]
     assert box == pytest.approx([0.0, 0.0, made.width, made.height], abs=1e-3)
@@ -271,8 +284,9 @@ def test_neighbouring_supports_and_spans_are_far_enough_apart_for_a_finger() -> 
     made = drawing.working(twelve(), None, read_all(twelve()))
     fixed = [p for p in made.picks if p.path.startswith(("/supports", "/spans")) or p.path == "/section"]
     assert min(math.hypot(a.x - b.x, a.y - b.y) for i, a in enumerate(fixed) for b in fixed[:i]) > 32
-    xs = [p.x for p in made.picks if p.path.startswith("/supports")]
-    assert all(96 <= b - a <= 260 for a, b in zip(xs, xs[1:], strict=False))
+    uneven = record_of(["1.0", "9.0", "1.2", "8.0"], ["bearing"] * 4 + ["pinned"])
+    xs = [p.x for p in drawing.working(uneven, None, read_all(uneven)).picks if p.path.startswith("/supports")]
+    assert all(96 <= b - a <= 260 for a, b in pairwise(xs))
 
 
 def test_a_blank_record_gives_a_drawing_of_questions() -> None:
@@ -282,7 +296,8 @@ def test_a_blank_record_gives_a_drawing_of_questions() -> None:
 
 
 def test_a_load_without_a_place_is_marked_unread_and_the_others_keep_theirs() -> None:
-    record = record_of(["4.0"], ["bearing", "pinned"], [load(1, "point", "10", at(0, "right", "1.0")), load(2, "point", "7")])
+    record = record_of(["4.0"], ["bearing", "pinned"],
+                       [load(1, "point", "10", at(0, "right", "1.0")), load(2, "point", "7")])
     made = drawing.working(record, None, read_all(record))
     a, b = (next(p.x for p in made.picks if p.path == f"/supports/{i}") for i in (0, 1))
     assert next(p.x for p in made.picks if p.path == "/loads/0") == pytest.approx(a + (b - a) / 4, abs=0.02)
@@ -306,9 +321,10 @@ def test_supports_are_told_apart_by_shape() -> None:
 
 
 def test_no_label_of_a_load_covers_another() -> None:
-    """Boxes from the count of characters, at half the font size each: the least that figures take (measured in Chromium)."""
+    """Boxes from the count of characters, at half the font size each."""
     for markup in (drawing.working(twelve(), solved(twelve())[1], read_all(twelve())).svg, every_drawing(twelve())[2]):
-        labels = [e for e in parsed(markup).iter(f"{SVG}text") if e.attrib["class"] == "label" and "transform" not in e.attrib]
+        labels = [e for e in parsed(markup).iter(f"{SVG}text")
+                  if e.attrib["class"] == "label" and "transform" not in e.attrib]
         boxes = [(float(e.attrib["x"]), float(e.attrib["y"]), 0.25 * float(e.attrib["font-size"]) * len(e.text or ""))
                  for e in labels if e.attrib["text-anchor"] == "middle"]
         assert len(boxes) > 40
@@ -335,7 +351,8 @@ def hostile(record: Record) -> Record:
     return record
 
 
-@pytest.mark.parametrize("make", [varied, twelve, lambda: hostile(varied()), lambda: record_of(["3.0"], ["fixed", "free"])])
+@pytest.mark.parametrize("make", [varied, twelve, lambda: hostile(varied()),
+                                  lambda: record_of(["3.0"], ["fixed", "free"])])
 def test_every_drawing_is_sound_xml_with_classes_only_and_finite_numbers(make: Any) -> None:
     for markup in every_drawing(make()):
         root = parsed(markup)
@@ -343,9 +360,10 @@ def test_every_drawing_is_sound_xml_with_classes_only_and_finite_numbers(make: A
         assert names <= {"svg", "title", "desc", "g", "path", "line", "rect", "circle", "text"}
         assert root.attrib["role"] == "img"
         assert [e.attrib["id"] for e in root.iter() if "id" in e.attrib] == root.attrib["aria-labelledby"].split()
-        for element in root.iter():
-            assert not {"style", "href", "onload", "onclick", "width", "height"} & set(element.attrib) or element.tag == f"{SVG}rect"
-            assert set(element.attrib.get("fill", "none") for element in root.iter()) <= {"none", "currentColor"}
+        assert not {"style", "href", "onload", "onclick"} & {name for e in root.iter() for name in e.attrib}
+        assert not {"width", "height"} & set(root.attrib)
+        inks = {e.attrib.get(name, "none") for e in root.iter() for name in ("fill", "stroke")}
+        assert inks <= {"none", "currentColor"}
         assert not re.search(r"\b(nan|inf)\b", markup, re.IGNORECASE)
         assert min(float(e.attrib["font-size"]) for e in root.iter(f"{SVG}text")) >= 12
 
@@ -360,8 +378,7 @@ def test_a_hostile_name_comes_out_once_escaped_and_reads_as_written() -> None:
                                  governing=[Mark(x=2.0, value=1e4, label=HOSTILE)], names=[HOSTILE, HOSTILE])):
         assert "<script" not in markup
         assert "&amp;lt;" not in markup
-        assert any(one.startswith("<script>") for one in ("".join(e.itertext()) for e in parsed(markup).iter()) ) \
-            or "<scr" in "".join(parsed(markup).itertext())
+        assert "<scr" in "".join(parsed(markup).itertext())
     assert any(pick.label.startswith("Load: <script>alert('1')</script> & \"two\"") for pick in made.picks)
     json.dumps([pick.label for pick in made.picks]).encode("utf-8")
 

@@ -351,7 +351,7 @@ def test_J6_a_free_end_in_the_middle_never_halves_the_span_that_is_judged() -> N
 # --- J7: two spans of 5 m under 10 kN/m: hogging 31.25 kN·m at B, none nearer to A than 3.75 m (18.75 x - 5 x^2 = 0) ------
 
 
-def hogging_in(*zones: tuple[str, dict]) -> list:  # type: ignore[type-arg]
+def hogging_in(*zones: tuple[str, dict | None]) -> list:  # type: ignore[type-arg]
     return [sheet(entry(SAG, "900 kNm"), entry(SHEAR, "900 kN"), *(entry(HOG, value, zone=where) for value, where in zones))]
 
 
@@ -405,9 +405,9 @@ def test_J7_a_zone_is_never_stretched_to_the_span_found() -> None:
 
 
 def test_J7_a_zone_from_the_right_end_is_the_mirror_of_one_from_the_left() -> None:
-    left = hogging_in(("35 kNm", zone("3.50 m", "3.20 m")))
+    left = hogging_in(("90 kNm", None), ("35 kNm", zone("3.50 m", "1.80 m")))
     right = copy.deepcopy(left)
-    right[0]["entries"][2]["zone"]["position"]["from"] = "right_end"
+    right[0]["entries"][3]["zone"]["position"]["from"] = "right_end"
     uneven = [strip("a", "10 kN/m", "0 m", "5.00 m", "permanent"), strip("b", "6 kN/m", "5.00 m", "5.00 m", "permanent")]
     mirrored = [strip("b", "6 kN/m", "0 m", "5.00 m", "permanent"), strip("a", "10 kN/m", "5.00 m", "5.00 m", "permanent")]
     a, b = (run_check(two_spans(loads=w, limits=limit)) for w, limit in ((uneven, left), (mirrored, right)))

@@ -9,16 +9,14 @@ Pyodide as well.
 from dataclasses import replace
 
 import numpy as np
-import pytest
 from hypothesis import assume, given
 from hypothesis import strategies as st
 from numpy.polynomial import polynomial
+from strategies import GRID, beams, randoms, situations
 
 from pysolver.beam import Beam, Stretch, Support
-from pysolver.errors import InputError
 from pysolver.loads import AppliedMoment, LineLoad, PointLoad
 from pysolver.statics import Response, extremes, solve, value
-from strategies import GRID, beams, randoms, situations
 
 QUANTITIES = ("shear", "moment", "slope", "sag")
 EXACT = 1e-12  # of the largest value: no linear system lies between the two sides
@@ -36,7 +34,8 @@ def scales(*responses: Response) -> dict[str, float]:
     push = max(float(np.abs(r.reactions).max()) for r in responses)
     found["shear"] = max(found["shear"], push, found["moment"] / lengths)
     found["moment"] = max(found["moment"], found["shear"] * 1e-3 * lengths)
-    return {quantity: max(size, 1e-300) for quantity, size in found.items()}
+    # N, N·m, rad and m below which a beam is as good as untouched: a load straight over a wall leaves rounding only
+    return {quantity: max(found[quantity], least) for quantity, least in zip(QUANTITIES, (1.0, 1.0, 1e-6, 1e-6), strict=True)}
 
 
 def everywhere(response: Response, quantity: str, places: np.ndarray) -> np.ndarray:
@@ -365,7 +364,7 @@ def test_extremes_bound_every_sample_and_are_reached(situation, quantity):
         assert min(abs(r - extreme.value) for r in reached) <= 1e-9 * size
 
 
-# ---- never NaN, never a mechanism, never nonsense
+# ---- never NaN
 
 @given(situations)
 def test_no_answer_holds_a_number_that_is_not_one(situation):
@@ -374,128 +373,3 @@ def test_no_answer_holds_a_number_that_is_not_one(situation):
         assert np.isfinite(array).all()
     assert np.isfinite(response.residual)
     assert (np.diff(response.x) > 0.0).all()
-
-
-NAN, INFINITE, ABSURD = float("nan"), float("inf"), 1e300
-
-
-def beam_of(length=6.0, supports=((0.0, "pinned"), (6.0, "bearing")), hinges=(), stretches=None) -> Beam:
-    return Beam(length=length, hinges=hinges, supports=tuple(Support(x=x, kind=kind) for x, kind in supports),
-                stretches=(Stretch(start=0.0, end=length, bending_stiffness=1e7),) if stretches is None else stretches)
-
-
-def stiff(ei: float, start: float = 0.0, end: float = 6.0) -> Stretch:
-    return Stretch(start=start, end=end, bending_stiffness=ei)
-
-
-LINE = {"start": 1.0, "end": 2.0, "start_intensity": 1000.0, "end_intensity": 1000.0}
-MID = PointLoad(x=3.0, force=1000.0)
-
-# what is wrong: how to ask for it, and a word of which one has to be in the message
-NONSENSE = {
-    "a beam of no length": (lambda: beam_of(0.0, stretches=(stiff(1e7),)), "beam"),
-    "a beam of negative length": (lambda: beam_of(-6.0, stretches=(stiff(1e7),)), "beam"),
-    "a beam of NaN length": (lambda: beam_of(NAN, stretches=(stiff(1e7),)), "length"),
-    "a beam of absurd length": (lambda: beam_of(ABSURD, stretches=(stiff(1e7),)), "length"),
-    "two supports in one place": (lambda: beam_of(supports=((0.0, "pinned"), (3.0, "pinned"), (3.0, "pinned"))), "span"),
-    "supports in the wrong order": (lambda: beam_of(supports=((6.0, "pinned"), (0.0, "pinned"))), "order"),
-    "no supports": (lambda: solve(beam_of(supports=()), [MID]), "rests on nothing"),
-    "a support off the beam": (lambda: beam_of(supports=((0.0, "pinned"), (6.5, "pinned"))), "support"),
-    "a support at NaN": (lambda: beam_of(supports=((NAN, "pinned"), (6.0, "pinned"))), "support"),
-    "a support at an absurd place": (lambda: beam_of(supports=((0.0, "pinned"), (ABSURD, "pinned"))), "support"),
-    "a support of an unknown kind": (lambda: Support(x=0.0, kind="magnet"), "magnet"),
-    "a spring without stiffness": (lambda: Support(x=0.0, kind="spring"), "stiffness"),
-    "a spring of no stiffness": (lambda: Support(x=0.0, kind="spring", stiffness=0.0), "stiffness"),
-    "a spring of NaN stiffness": (lambda: Support(x=0.0, kind="spring", stiffness=NAN), "stiffness"),
-    "a negative rotational spring": (lambda: Support(x=0.0, kind="pinned", rotational=-1.0), "stiffness"),
-    "a NaN settlement": (lambda: Support(x=0.0, kind="pinned", settlement=NAN), "settlement"),
-    "an absurd settlement": (lambda: Support(x=0.0, kind="pinned", settlement=ABSURD), "settlement"),
-    "EI of zero": (lambda: stiff(0.0), "EI"),
-    "EI below zero": (lambda: stiff(-1e7), "EI"),
-    "EI of NaN": (lambda: stiff(NAN), "EI"),
-    "EI of infinity": (lambda: stiff(INFINITE), "EI"),
-    "an absurd EI": (lambda: stiff(ABSURD), "EI"),
-    "a stretch that runs backwards": (lambda: stiff(1e7, 4.0, 2.0), "stretch"),
-    "no stretches": (lambda: beam_of(stretches=()), "EI"),
-    "stretches with a gap": (lambda: beam_of(stretches=(stiff(1e7, 0.0, 2.0), stiff(1e7, 3.0, 6.0))), "EI"),
-    "stretches that overlap": (lambda: beam_of(stretches=(stiff(1e7, 0.0, 4.0), stiff(1e7, 3.0, 6.0))), "EI"),
-    "stretches that end early": (lambda: beam_of(stretches=(stiff(1e7, 0.0, 5.0),)), "EI"),
-    "a hinge on a fixed support": (lambda: beam_of(supports=((0.0, "pinned"), (3.0, "fixed"), (6.0, "pinned")), hinges=(3.0,)), "hinge"),
-    "a hinge at the end": (lambda: beam_of(hinges=(0.0,)), "hinge"),
-    "a hinge off the beam": (lambda: beam_of(hinges=(7.0,)), "hinge"),
-    "a hinge at NaN": (lambda: beam_of(hinges=(NAN,)), "hinge"),
-    "one hinge twice": (lambda: beam_of(supports=((0.0, "fixed"), (6.0, "fixed")), hinges=(3.0, 3.0)), "hinge"),
-    "a hinge in a simple beam": (lambda: solve(beam_of(hinges=(2.0,)), [MID]), "hinge"),
-    "three hinges in a span": (lambda: solve(beam_of(supports=((0.0, "fixed"), (6.0, "fixed")), hinges=(1.0, 3.0, 5.0)), [MID]), "hinge"),
-    "a beam on one pin": (lambda: solve(beam_of(supports=((3.0, "pinned"),)), [MID]), "support"),
-    "a beam on one spring": (lambda: solve(Beam(length=6.0, supports=(Support(x=3.0, kind="spring", stiffness=1e6),), stretches=(stiff(1e7),)), [MID]), "support"),
-    "a cantilever with a hinge": (lambda: solve(beam_of(supports=((0.0, "fixed"),), hinges=(3.0,)), [MID]), "hinge"),
-    "a load left of the beam": (lambda: solve(beam_of(), [PointLoad(x=-0.1, force=1.0)]), "load"),
-    "a load right of the beam": (lambda: solve(beam_of(), [PointLoad(x=6.1, force=1.0)]), "load"),
-    "a line load that runs off the beam": (lambda: solve(beam_of(), [LineLoad(**{**LINE, "end": 6.1})]), "load"),
-    "a line load of no length": (lambda: LineLoad(**{**LINE, "end": 1.0}), "load"),
-    "a line load that runs backwards": (lambda: LineLoad(**{**LINE, "end": 0.5}), "load"),
-    "a NaN line load": (lambda: LineLoad(**{**LINE, "end_intensity": NAN}), "load"),
-    "a NaN load": (lambda: PointLoad(x=1.0, force=NAN), "load"),
-    "an infinite load": (lambda: PointLoad(x=1.0, force=-INFINITE), "load"),
-    "an absurd load": (lambda: PointLoad(x=1.0, force=ABSURD), "load"),
-    "a load at NaN": (lambda: PointLoad(x=NAN, force=1.0), "load"),
-    "a NaN moment": (lambda: AppliedMoment(x=1.0, moment=NAN), "moment"),
-    "a moment off the beam": (lambda: solve(beam_of(), [AppliedMoment(x=9.0, moment=1.0)]), "load"),
-    "a moment on a hinge": (lambda: solve(beam_of(supports=((0.0, "fixed"), (6.0, "pinned")), hinges=(3.0,)),
-                                          [AppliedMoment(x=3.0, moment=1.0)]), "hinge"),
-}
-
-
-@pytest.mark.parametrize(("ask", "word"), NONSENSE.values(), ids=NONSENSE.keys())
-def test_nonsense_is_refused_in_words_with_the_field_it_belongs_to(ask, word):
-    with pytest.raises(InputError) as caught:
-        ask()
-    assert caught.value.code
-    assert caught.value.field
-    assert word.lower() in caught.value.message.lower()
-    assert str(caught.value) == caught.value.message
-
-
-@pytest.mark.parametrize("gap", [0.0, 1e-12, 1e-9, 1e-6, 1e-3])
-def test_a_load_a_hair_beside_a_support_goes_into_that_support(gap):
-    response = solve(beam_of(length=9.0, supports=((0.0, "pinned"), (3.0, "pinned"), (9.0, "pinned"))),
-                     [PointLoad(x=3.0 + gap, force=1e6)])
-    assert response.reactions[1] == pytest.approx(1e6, rel=2.0 * gap + 1e-9)
-    assert max(abs(e.value) for e in extremes(response, "moment")) <= 1.1e6 * gap + 1e-3
-
-
-@pytest.mark.parametrize("stiffness", [1e-3, 1.0, 1e3, 1e6, 1e9, 1e12, 1e15])
-def test_springs_of_any_stiffness_lie_between_no_support_and_a_pin(stiffness):
-    """Force method: R = (5wL^4/384EI) / (1/k + L^3/48EI)."""
-    w, length, ei = 1e4, 8.0, 1e7
-    beam = Beam(length=length, stretches=(stiff(ei, 0.0, length),),
-                supports=(Support(x=0.0, kind="pinned"), Support(x=4.0, kind="spring", stiffness=stiffness),
-                          Support(x=length, kind="pinned")))
-    response = solve(beam, [LineLoad(start=0.0, end=length, start_intensity=w, end_intensity=w)])
-    expected = 5 * w * length**4 / 384 / ei / (1 / stiffness + length**3 / 48 / ei)
-    assert response.reactions[1] == pytest.approx(expected, rel=1e-7, abs=1e-12 * w * length)
-    assert value(response, "moment", 4.0) == pytest.approx(w * length**2 / 8 - expected * length / 4, rel=1e-6)
-
-
-@pytest.mark.parametrize("spans", [50, 200])
-def test_very_many_equal_spans_hog_alike_in_the_middle(spans):
-    """Far from the ends every span is fixed by its neighbours: M = -wL^2/12, by symmetry."""
-    length, w = 5.0, 1e4
-    beam = Beam(length=spans * length, stretches=(stiff(1e7, 0.0, spans * length),),
-                supports=tuple(Support(x=i * length, kind="bearing") for i in range(spans + 1)))
-    response = solve(beam, [LineLoad(start=0.0, end=beam.length, start_intensity=w, end_intensity=w)])
-    assert value(response, "moment", spans // 2 * length) == pytest.approx(-w * length**2 / 12, rel=1e-9)
-    assert response.reactions[0] == pytest.approx(w * length * (0.5 - (3 - np.sqrt(3)) / 12), rel=1e-9)
-
-
-@pytest.mark.parametrize("spans", [2, 7])
-def test_a_hinge_over_every_middle_support_leaves_simple_beams(spans):
-    """M = wL^2/8 in each, reactions wL/2, wL, ..., wL/2 (statics)."""
-    length, w = 4.0, 1e4
-    beam = beam_of(length=spans * length, supports=tuple((i * length, "bearing") for i in range(spans + 1)),
-                   hinges=tuple(i * length for i in range(1, spans)))
-    response = solve(beam, [LineLoad(start=0.0, end=beam.length, start_intensity=w, end_intensity=w)])
-    assert response.reactions == pytest.approx([w * length / 2, *[w * length] * (spans - 1), w * length / 2], rel=1e-9)
-    assert extremes(response, "moment")[0].value == pytest.approx(w * length**2 / 8, rel=1e-9)
-    assert abs(extremes(response, "moment")[1].value) <= 1e-8 * w * length**2

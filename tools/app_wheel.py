@@ -28,10 +28,3 @@ def build() -> Path:
         advice="correct pyproject.toml or pysolver/__init__.py.",
     )
     return next(folder.glob("asfound-*.whl"))
-
-
-def dependencies(wheel_metadata: list[str]) -> set[str]:
-    """Names of the run-time dependencies other than numpy, from `Requires-Dist` lines without an extra."""
-    names = {line.partition(";")[0].strip() for line in wheel_metadata if "extra ==" not in line}
-    plain = {name.split(">")[0].split("=")[0].split("<")[0].split("~")[0].split("!")[0].split("[")[0].strip() for name in names}
-    return plain - {"numpy"}

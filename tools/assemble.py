@@ -1,5 +1,6 @@
 """Assemble `dist/`: the whole site as any static host can serve it. The same inputs give the same bytes."""
 
+import hashlib
 import re
 import shutil
 import tomllib
@@ -74,45 +75,43 @@ def prove(dist: Path) -> str:
     return printed.strip().splitlines()[-1]
 
 
+def replace(dist: Path, fresh: Path) -> None:
+    """Put the finished site in the place of the older one."""
+    old = BUILD / "site-old"
+    shutil.rmtree(old, ignore_errors=True)
+    if dist.exists():
+        shutil.move(dist, old)
+    dist.parent.mkdir(parents=True, exist_ok=True)
+    shutil.move(fresh, dist)
+    shutil.rmtree(old, ignore_errors=True)
+
+
+def inputs() -> list[Path]:
+    """All that the site is made from."""
+    sources = [WEB, PYSOLVER, SERVICE_WORKER, REQUIREMENTS, ROOT / "pyproject.toml", ROOT / "LICENSE"]
+    ours = [*TOOLS.glob("*.py"), *TOOLS.glob("package*.json"), TOOLS / "pyodide", TOOLS / "licences"]
+    return [*sources, *ours, NPM_PYODIDE / "pyodide-lock.json"]
+
+
 def assemble(dist: Path = DIST, *, anew: bool = False) -> None:
     """Set up what is missing and bring the site in `dist` up to date; an older one stays until the new one is proved.
 
     Raises:
         ToolError: a step failed; says which and what to do.
     """
-    wheels = set_up()
-    title = f"Site in {dist.name}/"
-    wanted = stamps.digest(
-        [
-            WEB,
-            PYSOLVER,
-            SERVICE_WORKER,
-            REQUIREMENTS,
-            ROOT / "pyproject.toml",
-            ROOT / "LICENSE",
-            *TOOLS.glob("*.py"),
-            *TOOLS.glob("package*.json"),
-            TOOLS / "pyodide",
-            TOOLS / "licences",
-            NPM_PYODIDE / "pyodide-lock.json",
-        ],
-        str(dist),
-    )
-    if not anew and stamps.is_fresh("site", wanted, dist / "sw.js"):
-        up_to_date(title)
-        return
-    archives = archive.build(wheels)
-    fresh, old = BUILD / "site-new", BUILD / "site-old"
-    for folder in (fresh, old):
-        shutil.rmtree(folder, ignore_errors=True)
-    with step(title) as running:
-        build = lay_out(fresh, wheels, archives)
-        running.note(f"version {build['version']}, build {build['build']}, {megabytes(size_of(fresh))}")
-    with step("Start of the finished site's Python") as running:
-        running.note(prove(fresh))
-    if dist.exists():
-        dist.rename(old)
-    dist.parent.mkdir(parents=True, exist_ok=True)
-    shutil.move(fresh, dist)
-    shutil.rmtree(old, ignore_errors=True)
-    stamps.set_fresh("site", wanted)
+    with stamps.one_at_a_time():
+        wheels = set_up()
+        title, stamp = f"Site in {dist.name}/", f"site-{hashlib.sha256(str(dist).encode()).hexdigest()[:8]}"
+        wanted = stamps.digest(inputs())
+        if not anew and stamps.is_fresh(stamp, wanted, dist / "sw.js"):
+            up_to_date(title)
+            return
+        archives, fresh = archive.build(wheels), BUILD / "site-new"
+        shutil.rmtree(fresh, ignore_errors=True)
+        with step(title) as running:
+            build = lay_out(fresh, wheels, archives)
+            running.note(f"version {build['version']}, build {build['build']}, {megabytes(size_of(fresh))}")
+        with step("Start of the finished site's Python") as running:
+            running.note(prove(fresh))
+        replace(dist, fresh)
+        stamps.set_fresh(stamp, wanted)

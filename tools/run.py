@@ -48,11 +48,11 @@ def run(wish: argparse.Namespace) -> int:
     if wish.command == "lock":
         lock.write_requirements()
         return 0
-    with one_at_a_time():
-        if wish.command == "setup":
+    if wish.command == "setup":
+        with one_at_a_time():
             assemble.set_up()
-        else:
-            assemble.assemble(anew=getattr(wish, "anew", False))
+        return 0
+    assemble.assemble(anew=getattr(wish, "anew", False))
     if wish.command == "serve":
         serve.serve_until_stopped(wish.port, wish.prefix)
     return 0

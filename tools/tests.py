@@ -132,11 +132,11 @@ def run_check(check: Check) -> str:
 def run_checks(names: Sequence[str]) -> int:
     """Set up, assemble, run the steps (even after one has failed), print the summary; returns the exit code."""
     checks = chosen(names)
-    with one_at_a_time():
-        if {check.name for check in checks} <= {"lint"}:
+    if {check.name for check in checks} <= {"lint"}:
+        with one_at_a_time():
             venv.ensure()
-        else:
-            assemble.assemble()
+    else:
+        assemble.assemble()
     results = []
     for check in checks:
         began = time.monotonic()

@@ -36,7 +36,7 @@ export function barOf(controller) {
 export function OutcomeBar({ controller }) {
   const { word, lines, typing } = barOf(controller);
   const go = () => controller.go(controller.state.current.value?.refusal?.field || '/result');
-  return html`<button class=${`outcome-bar is-${word} ${typing ? 'is-typing' : ''}`} aria-label=${`Outcome: ${lines.filter(Boolean).join('. ')}. Open the result`} onClick=${go}>
+  return html`<button class=${`outcome-bar is-${word} ${typing ? 'is-typing' : ''}`} aria-label=${`Outcome: ${lines.filter(Boolean).map((line) => line.replace(/\.$/, '')).join('. ')}. Open the result`} onClick=${go}>
     <span class="outcome-mark"><${OutcomeShape} word=${word} /></span>
     <span class="outcome-lines" role="status" aria-live="polite">${[0, 1, 2].map((i) => html`<span key=${i} class=${i === 0 ? 'outcome-first' : ''}>${lines[i] ?? ''}</span>`)}</span>
   </button>`;

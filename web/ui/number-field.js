@@ -28,9 +28,9 @@ export function NumberField({ controller, field, alone }) {
   const pad = usesPad(controller);
   const wanted = state.focus.value === field.path;
   useEffect(() => { if (wanted && state.padPart.value === 'text' && document.activeElement !== input.current) { input.current?.focus({ preventScroll: Boolean(alone) }); if (!alone) input.current?.scrollIntoView({ block: 'center' }); } }, [wanted, state.focus.value]);
-  const focused = () => { state.padPart.value = 'text'; if (state.focus.value !== field.path) state.focus.value = field.path; if (pad) state.padUp.value = true; };
-  const key = (/** @type {KeyboardEvent} */ event) => { if (event.key === 'Enter') { event.preventDefault(); void controller.next(field); } };
   const waiting = differs(state.drafts.value[field.path], getAt(state.record.value, field.path));
+  const focused = () => { state.padPart.value = 'text'; if (state.focus.value !== field.path) state.focus.value = field.path; if (pad) state.padUp.value = true; if (!waiting) input.current?.select(); };
+  const key = (/** @type {KeyboardEvent} */ event) => { if (event.key === 'Enter') { event.preventDefault(); void controller.next(field); } };
   return html`<div class=${`field number-field ${waiting ? 'is-waiting' : ''} ${alone && draft.means === 'stated' ? 'is-stated' : ''}`}>
     <label for=${idOf(field)}>${alone ? field.name : field.label}</label>
     <div class="number-line">
@@ -41,6 +41,7 @@ export function NumberField({ controller, field, alone }) {
       ${waiting && !alone && html`<button class="key key-main" aria-label=${`Enter, ${field.name}`} onClick=${() => { void controller.next(field); }}>Enter</button>`}
     </div>
     <${ReadBack} controller=${controller} field=${field} waiting=${waiting} />
+    ${waiting && !alone && html`<button class="key key-known" aria-label=${`Drop what is typed, ${field.name}`} onClick=${() => { state.reading.value = null; editing.setDraft(field.path, null); }}>Drop what is typed</button>`}
     ${alone && draft.means === 'stated' && html`<${Stated} controller=${controller} field=${field} pad />`}
     ${!alone && field.help && html`<p class="help">${field.help}</p>`}
     ${!alone && field.means && (draft.text || waiting) && html`<${Means} controller=${controller} field=${field} />`}
@@ -106,6 +107,7 @@ function StatedEnd({ controller, field, end, label, onKey }) {
   const pad = usesPad(controller);
   const wanted = pad && state.focus.value === field.path && state.padPart.value === end;
   useEffect(() => { if (wanted) input.current?.focus({ preventScroll: true }); }, [wanted]);
+  const waiting = differs(state.drafts.value[field.path], getAt(state.record.value, field.path));
   const focused = () => { if (!pad) return; state.padPart.value = end; state.focus.value = field.path; state.padUp.value = true; };
   return html`<label>${label}<input id=${`${idOf(field)}-${end}`} ref=${input} type="text" maxlength="40" inputmode=${pad ? 'none' : 'text'} autocomplete="off" readonly=${Boolean(state.readOnly.value)}
     aria-label=${`${field.name}, ${label.toLowerCase()}`} value=${editing.draftNow(field)[end] ?? ''} onFocus=${focused} onKeyDown=${onKey}

@@ -11,9 +11,12 @@ export function SolverStanding({ controller }) {
     return html`<div class="standing standing-failed" role="alert"><p><b>The solver did not start.</b> ${message} Everything entered stays stored and can be exported; nothing can be judged yet.</p>
       <button class="key" onClick=${controller.retrySolver}>Try again</button></div>`;
   }
-  return html`<div class="standing" role="status"><p>${label || 'The solver is starting.'} You can enter everything meanwhile.</p>
+  return html`<div class="standing" role="status"><p>${sentence(label || 'The solver is starting')} You can enter everything meanwhile.</p>
     ${total > 0 ? html`<progress aria-label="Start of the solver" max=${total} value=${loaded}></progress>` : html`<progress aria-label="Start of the solver"></progress>`}</div>`;
 }
+
+/** @param {string} words */
+const sentence = (words) => (/[.!?]$/.test(words) ? words : `${words}.`);
 
 /** @type {Record<string, string>} */
 const SAID = {
