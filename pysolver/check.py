@@ -57,7 +57,7 @@ def run_check(document: Any, *, full: bool = True) -> Result:
         ready = model(record, readings)
         layout = ready.layouts(ready.best_point()[None, :], ready.ways[0])[0]
         response = solve(layout.beam, layout.loads)
-        facts = gaps(record, readings, layout)
+        facts = gaps(record, readings, layout, (*readings.errors, *ready.errors))
         governed = govern(ready, facts, full=full)
     except InputError as error:
         return _unfinished(record, readings, [error])

@@ -100,7 +100,7 @@ def _compare_reaction(along: Along, one: Judged, low: Floats, high: Floats) -> W
     j = along.layouts[0].real.index(one.criterion.support)
     sign = 1.0 if one.criterion.kind == "reaction" else -1.0
     values = sign * along.batch.reactions[:, j][:, None, :, None]
-    capacity = np.full((len(along.layouts), 1), one.criterion.stretches[0].capacity)
+    capacity = np.full((len(along.layouts), 1), min(s.capacity for s in one.criterion.stretches))
     return worst(influence(values, np.zeros((len(along.layouts), 1))), 1.0, low, high, capacity)
 
 

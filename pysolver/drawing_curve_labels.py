@@ -115,9 +115,10 @@ def extremes(layout: Layout, pieces: Sequence[Piece], floor: float) -> list[tupl
     """(x, value) of the largest and smallest value of every span and overhang, largest magnitude first."""
     bounds = sorted({0.0, *(layout.supports[j] for j in layout.real), layout.beam.length})
     found: list[tuple[float, float]] = []
+    of_piece = peaks(pieces)
     for a, b in pairwise(bounds):
-        here = [p for p in pieces if a - 1e-9 <= 0.5 * (p[0] + p[1]) <= b + 1e-9]
-        values = [one for piece in here for one in _candidates(piece)]
+        values = [one for piece, many in zip(pieces, of_piece, strict=True)
+                  if a - 1e-9 <= 0.5 * (piece[0] + piece[1]) <= b + 1e-9 for one in many]
         if values:
             found += [max(values, key=lambda v: v[1]), min(values, key=lambda v: v[1])]
     most = max((abs(v) for _, v in found), default=0.0)
@@ -129,11 +130,19 @@ def extremes(layout: Layout, pieces: Sequence[Piece], floor: float) -> list[tupl
     return kept
 
 
-def _candidates(piece: Piece) -> Iterator[tuple[float, float]]:
-    start, end, c = piece
-    inner = piecewise.stationary(c[None, :], np.array([end - start]))[0]
-    for s in (0.0, *(float(s) for s in inner if not np.isnan(s)), end - start):
-        yield start + s, float(piecewise.evaluate(c, np.asarray(s)))
+def peaks(pieces: Sequence[Piece]) -> list[list[tuple[float, float]]]:
+    """(x, value) at both ends and at the stationary points of each piece: all its extremes are among them."""
+    if not pieces:
+        return []
+    lengths = np.array([end - start for start, end, _ in pieces])
+    c = np.zeros((len(pieces), max(2, *(len(one) for _, _, one in pieces))))
+    for row, (_, _, one) in zip(c, pieces, strict=True):
+        row[:len(one)] = one
+    inner = piecewise.stationary(c, lengths)
+    s = np.concatenate([np.zeros((len(pieces), 1)), inner, lengths[:, None]], axis=1)
+    values = piecewise.evaluate(c[:, None, :], np.where(np.isnan(s), 0.0, s))
+    return [[(start + float(t), float(v)) for t, v in zip(row, across, strict=True) if not np.isnan(t)]
+            for (start, _, _), row, across in zip(pieces, s, values, strict=True)]
 
 
 def _around(figure: Figure, x: float, value: float, words: str, clear: float = 0.0) -> Iterator[Place]:

@@ -18,7 +18,7 @@ from pysolver import piecewise, svg
 from pysolver.comparison import Along, from_chord
 from pysolver.display import System, show
 from pysolver.drawing_body import WIDTH, TrueScale
-from pysolver.drawing_curve_labels import NAME_ROW, Figure, base_line, label_values, name_rows
+from pysolver.drawing_curve_labels import NAME_ROW, Figure, base_line, label_values, name_rows, peaks
 from pysolver.found import Layout
 from pysolver.piecewise import Floats
 from pysolver.record import SUPPORT_NAMES
@@ -119,11 +119,7 @@ def best_pieces(quantity: Quantity, response: Response, layout: Layout) -> list[
 def _reach(pieces: Sequence[Piece], governing: Sequence[Mark], floor: float) -> tuple[float, float]:
     """The smallest and largest value to be drawn, zero included; exact from ends and stationary points. Zeros when all
     is below the floor."""
-    values = [0.0, *(mark.value for mark in governing)]
-    for start, end, c in pieces:
-        inner = piecewise.stationary(c[None, :], np.array([end - start]))[0] if len(c) > 1 else np.zeros(0)
-        places = np.array([0.0, end - start, *inner[~np.isnan(inner)]])
-        values += [float(v) for v in piecewise.evaluate(c, places)]
+    values = [0.0, *(mark.value for mark in governing), *(v for many in peaks(pieces) for _, v in many)]
     return (min(values), max(values)) if max(abs(v) for v in values) > floor else (0.0, 0.0)
 
 

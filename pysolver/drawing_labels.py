@@ -8,6 +8,8 @@ import math
 from collections.abc import Iterable, Sequence
 from dataclasses import dataclass, field
 
+import numpy as np
+
 from pysolver import svg
 
 WIDE = 0.58
@@ -63,11 +65,13 @@ class Sheet:
              most: float = math.inf) -> Place | None:
         """The first place that covers nothing, else the first that covers fewest lines (up to `most`), else None."""
         best: tuple[int, Place] | None = None
+        soft = np.array([(b.x0, b.y0, b.x1, b.y1) for b in self.soft]).reshape(-1, 4)
         for place in places:
             box = box_of(words, place, size)
             if not self._inside(box) or any(box.meets(other) for other in self.hard):
                 continue
-            covered = sum(box.meets(other) for other in self.soft)
+            covered = int(((box.x0 < soft[:, 2]) & (soft[:, 0] < box.x1) & (box.y0 < soft[:, 3])
+                           & (soft[:, 1] < box.y1)).sum())
             if covered == 0:
                 return place
             if covered <= most and (best is None or covered < best[0]):

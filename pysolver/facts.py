@@ -6,7 +6,7 @@ says that the limits do not belong to this beam as found: even a ratio above one
 numbers alone are over" (J23).
 """
 
-from collections.abc import Iterator
+from collections.abc import Iterator, Sequence
 from dataclasses import dataclass
 from typing import Any
 
@@ -20,6 +20,8 @@ from pysolver.vocabulary import label
 
 OFFICE = "the office that issued the limit"
 YOU = "you, from where you stand"
+
+TAPE = 0.010  # m, own rule: as far as a tape may be out, a span that was issued is not said to be longer
 
 ALLOWED = {"unfactored": {"unfactored"}, "factored": {"factored"}}  # basis of the limit: basis of the set (J4)
 
@@ -40,14 +42,21 @@ class Gap:
         return self.sheet in (None, sheet) and (not self.moments or kind in ("sagging", "hogging"))
 
 
-def gaps(record: Record, readings: Readings, layout: Layout) -> list[Gap]:
-    """All missing and voiding facts, those first that a person on site can answer at once."""
+def gaps(record: Record, readings: Readings, layout: Layout, wrong: Sequence[InputError]) -> list[Gap]:
+    """All missing and voiding facts, those first that a person on site can answer at once. wrong: what of the limits
+    could not be used; a limit that is on the sheet is never passed over."""
     found = [*_condition(record), *_member(record), *_permanent(record)]
+    found += [Gap(text=error.message.rstrip("."), who=YOU, path=error.field, sheet=_sheet_index(error.field)) for error in wrong]
     for i, sheet in enumerate(record["limits"]):
         found += [*_sheet(record, i, sheet), *_span_and_restraint(record, readings, layout, i, sheet)]
     if not record["limits"]:
         found.append(Gap(text="no limit is entered", who=OFFICE, path="/limits"))
     return found
+
+
+def _sheet_index(field: str) -> int | None:
+    parts = field.split("/")
+    return int(parts[2]) if parts[1] == "limits" and len(parts) > 2 else None
 
 
 def distressed(record: Record) -> bool:
@@ -84,8 +93,6 @@ def _member(record: Record) -> Iterator[Gap]:
 
 def _permanent(record: Record) -> Iterator[Gap]:
     covers = {sheet["covers"] for sheet in record["limits"]}
-    if not covers & {"all", "all_but_self", None}:
-        return
     answer = record["permanent"]["answer"]
     entered = any(load["category"] == "permanent" for load in record["loads"])
     if answer is None:
@@ -95,6 +102,9 @@ def _permanent(record: Record) -> Iterator[Gap]:
     elif answer == "entered" and not entered:
         yield Gap(text="the permanent load is said to be entered, but no load is permanent", who=YOU, path="/loads")
     own = record["self_weight"]["answer"]
+    if own == "in_permanent" and answer == "none":
+        yield Gap(text="the beam's own weight is said to be in the permanent load, but that is said to be none", who=YOU,
+                  path="/self_weight/answer")
     if covers & {"all", None} and (own in (None, "not_known") or (own == "entered" and record["self_weight"]["mass"] is None)):
         yield Gap(text="the beam's own weight", who="the drawings or a section table", path="/self_weight/answer")
 
@@ -113,6 +123,8 @@ def _sheet(record: Record, i: int, sheet: dict[str, Any]) -> Iterator[Gap]:
         yield Gap(text=f"{name}: which loads the limits cover", who=OFFICE, path=f"{path}/covers", sheet=i)
     if sheet["covers"] == "added" and not sheet["covers_loads"]:
         yield Gap(text=f"{name}: which of the loads were added later", who=OFFICE, path=f"{path}/covers_loads", sheet=i)
+    if sheet["covers"] == "added" and not set(sheet["covers_loads"]) <= {load["id"] for load in record["loads"]}:
+        yield Gap(text=f"{name} covers a load that is not on the record", who=YOU, path=f"{path}/covers_loads", sheet=i)
     if any(e["criterion"] in ("line_load", "area_load") for e in sheet["entries"]) and not is_simple_span(record):
         yield Gap(text=f"{name}: a load as limit fits a simple span only, and this beam is none", who=OFFICE,
                   path=f"{path}/entries", sheet=i, void=True)
@@ -147,11 +159,14 @@ def _issued_span(readings: Readings, layout: Layout, i: int, name: str) -> Itera
                   moments=True)
         return
     for k, (start, end) in enumerate(layout.spans):
-        measured = readings.measured[f"/spans/{k}/length"]
-        if end - start - (measured.best - measured.low) > issued + 1e-9:
+        path, measured = f"/spans/{k}/length", readings.measured[f"/spans/{k}/length"]
+        if end - start > issued + TAPE:
             yield Gap(text=f"the span found, {end - start:.3f} m, is longer than the {issued:.3f} m that {name} was issued for",
-                      who=OFFICE, path=f"/spans/{k}/length", sheet=i, moments=True, void=True)
+                      who=OFFICE, path=path, sheet=i, moments=True, void=True)
             return
+        if end - start + measured.high - measured.best > issued + 2 * TAPE:
+            yield Gap(text=f"whether the span is longer than the {issued:.3f} m that {name} was issued for: it may be",
+                      who="whoever can tape it", path=path, sheet=i, moments=True)
 
 
 def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any]) -> Iterator[Gap]:
@@ -166,7 +181,10 @@ def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any]
     if spacing is None:
         yield Gap(text="the distance between the places where the beam is held sideways", who="whoever can see its top",
                   path="/restraint/spacing", sheet=i, moments=True)
-    elif spacing.low > issued + 1e-9:
+    elif spacing.best <= issued + TAPE < spacing.high - TAPE:
+        yield Gap(text=f"whether the restraint spacing is wider than the {issued:.3f} m of {name}: it may be",
+                  who="whoever can tape it", path="/restraint/spacing", sheet=i, moments=True)
+    elif spacing.best > issued + TAPE:
         yield Gap(text=f"the restraint spacing found, {spacing.best:.3f} m, is wider than the {issued:.3f} m of {name}",
                   who=OFFICE, path="/restraint/spacing", sheet=i, moments=True, void=True)
 

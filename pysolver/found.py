@@ -202,7 +202,8 @@ def _loads(record: Record, readings: Readings, pick: Pick, frame: Frame) -> list
 
 def source_of(load: dict[str, Any]) -> str:
     """The unknown that a load belongs to: what the person named as its source, or itself."""
-    return str(load["source"]).strip() or str(load["id"])
+    named = str(load["source"]).strip()
+    return f"source {named}" if named else f"load {load['id']}"  # no person's word can be taken for SELF_WEIGHT
 
 
 def _one_load(load: dict[str, Any], path: str, best: dict[str, float], pick: Pick, frame: Frame) -> Load:

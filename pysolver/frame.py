@@ -51,7 +51,7 @@ class Frame:
             middle.append(middle[-1] + length + (self._half(i) + self._half(i + 1) if clear else 0.0))
         self.x = middle
         self.length = middle[-1] + self.right
-        self.faces = [(x - self._half(j), x + self._half(j)) for j, x in enumerate(middle)]
+        self.faces = [(x - self._to_face(j, j - 1), x + self._to_face(j, j)) for j, x in enumerate(middle)]
         self.real = tuple(j for j, s in enumerate(record["supports"]) if s["kind"] != "free")
         self.x = [self._reacting(j) for j in range(count)]
 
@@ -62,8 +62,10 @@ class Frame:
             return 0.0
 
     def _bearing(self, j: int) -> float:
-        found = self._or_zero(f"/supports/{j}/bearing")
-        return max(found, self.readings.issued.get(f"/supports/{j}/bearing_drawn", 0.0)) if found else 0.0
+        path = f"/supports/{j}/bearing"
+        if path not in self.readings.measured:
+            return 0.0
+        return max(self.pick(path), self.readings.issued.get(f"{path}_drawn", 0.0))
 
     def _half(self, j: int) -> float:
         """From the reaction to the inner face. An end support under the effective rule reacts at most depth/2 inside."""
@@ -72,6 +74,14 @@ class Frame:
         if at_end and self.reading.rule == "effective":
             half = min(half, (self._or_zero("/section/depth") or self.bearing[j]) / 2)
         return half
+
+    def _to_face(self, j: int, span: int) -> float:
+        """From the middle of a support to its face towards a span: as far as the clear span was widened by; otherwise
+        half of the bearing that was found."""
+        spans = self.record["spans"]
+        if 0 <= span < len(spans) and spans[span]["measure"] == "clear":
+            return self._half(j)
+        return self._or_zero(f"/supports/{j}/bearing") / 2
 
     def _reacting(self, j: int) -> float:
         last = len(self.bearing) - 1

@@ -223,6 +223,7 @@ def infinite_hold_down(model: Model, best: Along, least_worst: dict[int, float])
             made.append(Compared(
                 kind="hold_down", sheet=0, support=support["name"], kind_of_limit=None, basis=None,
                 place=f"at {support['name']}", x=best.layouts[0].supports[j], unfactored=max(-at_best, 0.0),
-                bare=0.0, factored=max(-at_best, 0.0), worst=-at_worst, capacity=0.0, ratio=math.inf if at_best < -LIFTS * size else 0.0, low=0.0,
-                high=math.inf, case="", searched=False, worst_place=f"at {support['name']}"))
+                bare=0.0, factored=max(-at_best, 0.0), worst=-at_worst, capacity=0.0,
+                ratio=math.inf if at_best < -LIFTS * size else 0.0, low=0.0, high=math.inf, case="", searched=False,
+                worst_place=f"at {support['name']}"))
     return made

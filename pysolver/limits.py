@@ -50,8 +50,6 @@ def criteria(record: Record, readings: Readings) -> tuple[list[Criterion], list[
         grouped: dict[tuple[Any, ...], list[Stretch]] = {}
         for j, entry in enumerate(sheet["entries"]):
             path = f"/limits/{i}/entries/{j}"
-            if entry["value"] is None:
-                continue
             try:
                 found += _special(record, readings, i, entry, path, grouped)
             except InputError as error:
@@ -64,6 +62,7 @@ def criteria(record: Record, readings: Readings) -> tuple[list[Criterion], list[
 def _special(record: Record, readings: Readings, sheet: int, entry: dict[str, Any], path: str,
              grouped: dict[tuple[Any, ...], list[Stretch]]) -> list[Criterion]:
     """Criteria that stand alone (L/n, derived from a load); plain values are put into `grouped` instead."""
+    _refuse_incomplete(record, readings, entry, path)
     kind, under = entry["criterion"], entry["sag_under"] or "total"
     if kind == "sag" and f"{path}/value" not in readings.issued:
         if any(error.field == f"{path}/value" for error in readings.errors):
@@ -72,9 +71,6 @@ def _special(record: Record, readings: Readings, sheet: int, entry: dict[str, An
                           under=under)]
     if f"{path}/value" not in readings.issued:
         return []
-    if entry["zone"] is not None and not zone_complete(entry["zone"], f"{path}/zone", readings):
-        raise InputError(code="zone", field=f"{path}/zone", message="Where this limit holds is not entered in full: give the "
-                         "point it is measured from, the distance and the length, or let it hold over the whole beam.")
     value = readings.issued[f"{path}/value"]
     if value <= 0.0:
         raise InputError(code="limit", field=f"{path}/value",
@@ -90,6 +86,19 @@ def _special(record: Record, readings: Readings, sheet: int, entry: dict[str, An
         key = (kind, support if kind in ("reaction", "hold_down") else -1, under if kind == "sag" else "total")
         grouped.setdefault(key, []).append(Stretch(capacity=value, zone=zone))
     return []
+
+
+def _refuse_incomplete(record: Record, readings: Readings, entry: dict[str, Any], path: str) -> None:
+    """A line on the sheet that is not complete is never passed over: the outcome waits for it."""
+    if entry["value"] is None:
+        raise InputError(code="limit", field=f"{path}/value",
+                         message="This limit has no figure yet. Enter it, or take its line off the sheet.")
+    if entry["support"] is not None and entry["support"] >= len(record["supports"]):
+        raise InputError(code="limit", field=f"{path}/support",
+                         message="This limit is for a support that the beam does not have. Pick the support again.")
+    if entry["zone"] is not None and not zone_complete(entry["zone"], f"{path}/zone", readings):
+        raise InputError(code="zone", field=f"{path}/zone", message="Where this limit holds is not entered in full: give the "
+                         "point it is measured from, the distance and the length, or let it hold over the whole beam.")
 
 
 def sag_ratio(text: str, field: str) -> float:

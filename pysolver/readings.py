@@ -35,10 +35,18 @@ def read_all(record: Record) -> Readings:
             if not has_range:
                 issued[path] = read_exact(quantity, dimension, path)
             else:
-                measured[path] = read_measured(quantity, dimension, path)
+                measured[path] = _positive(read_measured(quantity, dimension, path), path, quantity["text"])
         except InputError as error:
             errors.append(error)
     return Readings(measured=measured, issued=issued, errors=tuple(errors))
+
+
+def _positive(number: Measured, path: str, text: str) -> Measured:
+    """A bearing or a depth is more than nothing at every end of its range; only a settlement may be an uplift."""
+    if path.endswith(("/bearing", "/depth")) and number.low <= 0.0:
+        raise InputError(code="negative", field=path, message=f"{text!r} cannot be a size: it, and all of its range, must be "
+                         "more than zero. Measure again, or leave it unanswered.")
+    return number
 
 
 def written(record: Record) -> Iterator[tuple[str, dict[str, Any], str, bool]]:

@@ -48,6 +48,10 @@ def _check_references(record: Record) -> None:
     if len(record["supports"]) != len(record["spans"]) + 1:
         raise InputError(code="supports", field="/supports", message=f"{len(record['spans'])} spans need "
                          f"{len(record['spans']) + 1} supports, but {len(record['supports'])} are listed.")
+    for i, support in enumerate(record["supports"][1:-1], start=1):
+        if support["kind"] == "free":
+            raise InputError(code="free_inside", field=f"/supports/{i}/kind", message=f"Support {support['name']} stands between "
+                             "two spans, so it cannot be a free end. Make the two spans one, or say what is under it.")
     for name in ("loads", "limits"):
         ids = [item["id"] for item in record[name]]
         if len(set(ids)) != len(ids):

@@ -18,7 +18,8 @@ from numpy.polynomial import polynomial
 
 from pysolver import drawing, drawing_bezier, drawing_curves
 from pysolver.drawing import Mark, Rail
-from pysolver.found import Layout, Reading, lay_out
+from pysolver.found import Layout, lay_out
+from pysolver.frame import Reading
 from pysolver.readings import Readings, read_all
 from pysolver.record import Record, blank, blank_support, validated
 from pysolver.statics import Response, solve

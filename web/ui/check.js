@@ -40,7 +40,7 @@ export function CheckScreen({ controller }) {
   return html`<div class=${`check ${pad ? 'with-pad' : ''} ${pad && state.meansFor.value ? 'asks-means' : ''} ${station.path === '/result' ? 'at-result' : ''}`}>
     ${!pad && html`<${TopLine} controller=${controller} />`}
     ${(pad || !state.screen.value.all) && html`<${WorkingDrawing} controller=${controller} station=${station} strip=${Boolean(pad) || station.path === '/result'} pickable=${!pad} />`}
-    ${pad ? html`<${PadPanel} key=${pad.path} controller=${controller} field=${pad} />`
+    ${pad ? html`<main class="pad-main"><h1 class="unseen">${titleOf(state.entry.value)}</h1><${PadPanel} key=${pad.path} controller=${controller} field=${pad} /></main>`
       : state.screen.value.all ? html`<${AllFields} controller=${controller} station=${station} withResult />`
         : html`<${Walk} controller=${controller} station=${station} /><${OneStation} key=${station.path} controller=${controller} station=${station} />`}
     <${OutcomeBar} controller=${controller} />
@@ -68,7 +68,7 @@ function TopLine({ controller, wide }) {
   const all = state.screen.value.all;
   return html`<header class="top-line">
     <button class="key" aria-label="Back to the list" onClick=${controller.back}>‹ List</button>
-    <p class="top-title"><b>${titleOf(entry)}</b><span>${endsOf(entry.record)}</span></p>
+    <div class="top-title"><h1>${titleOf(entry)}</h1><span>${endsOf(entry.record)}</span></div>
     ${last && html`<button class="key" aria-label=${`Undo: ${last.label}`} onClick=${() => { void controller.editing.undo(); }}>Undo</button>`}
     ${wide ? html`<button class="key" onClick=${() => controller.show({ name: 'share', id: entry.id })}>Share</button>`
       : html`<button class="key" aria-pressed=${Boolean(all)} aria-label="All fields" onClick=${() => controller.show({ ...state.screen.value, all: !all }, { replace: true })}>${all ? 'Walk' : 'All'}</button>`}
