@@ -25,10 +25,11 @@ class SiteProcess:
         self.port = urlsplit(self.url).port or 0
 
     def stop(self) -> None:
-        """End the process; raises if anything still answers at its port."""
-        if self._process.poll() is None:
-            self._process.terminate()
-            self._process.wait(20)
+        """End the process; raises if anything still answers at its port. Nothing to do if it has ended."""
+        if self._process.poll() is not None:
+            return
+        self._process.terminate()
+        self._process.wait(20)
         if self._process.stdout:
             self._process.stdout.close()
         assert refused(self.port), f"something still listens at port {self.port}"

@@ -43,7 +43,7 @@ def answer(result: Result, now: str | None = None) -> dict[str, Any]:
         "readings": readings(result, system), "errors": [_error(e) for e in result.errors],
         "outcome": outcome(result, system, now), "criteria": [criterion(result, c, system) for c in by_weight(result.compared)],
         "reactions": reactions(result, system), "compared": _compared_names(result), "not_compared": not_compared(result),
-        "notes": notes(result, system), "cautions": words()["cautions"], "decisions": decisions(result),
+        "notes": notes(result, system), "cautions": words()["cautions"], "decisions": decisions(result, now),
         "clear_area": clear_area(result), "equilibrium": equilibrium(result), "numbers": numbers(result),
         "versions": versions()}
 
@@ -74,8 +74,8 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
     first = f"as found earlier, look again. It was: {decided.title}" if old else decided.title
     memory = "; factors from memory" if decided.from_memory else ""
     return {"word": decided.word, "title": decided.title, "reasons": list(decided.reasons),
-            "lines": [first, bar_numbers(decided.leading) + memory, what_now(decided, until)],
-            "rules_out": ", ".join(_decision_label(d) for d in ruled_out(decided)) or "nothing",
+            "lines": [first, bar_numbers(decided.leading) + memory, what_now(decided, until, old=old)],
+            "rules_out": ", ".join(_decision_label(d) for d in ruled_out(decided, old=old)) or "nothing",
             "missing": [{"text": g.text, "who": g.who, "path": g.path} for g in decided.gaps],
             "treated_as_over": decided.treated_as_over, "lapsed": old,
             "as_found": f"as found at {record['found_at']}" if record["found_at"] else "the time it was found is not stated",
@@ -138,7 +138,7 @@ def reactions(result: Result, system: System) -> list[dict[str, str]]:
     best = result.governed.best
     told = []
     for i, j in enumerate(best.layouts[0].real):
-        low = float(least_reaction(best, result.model, j, best=False)[0])
+        low = least_reaction(best, result.model, j, at_best=False)
         high = max((abs(c.worst) for c in result.compared if c.kind == "reaction"
                     and c.support == result.record["supports"][j]["name"]), default=None)
         told.append({"support": result.record["supports"][j]["name"],
@@ -176,7 +176,7 @@ def notes(result: Result, system: System) -> list[str]:
                     "worst case of them was searched, not proven.")
     if result.governed.not_varied:
         names = ", ".join(path_name(record, path) for path in result.governed.not_varied)
-        told.append(f"Not varied, because others matter more: {names}.")
+        told.append(f"Not varied together with these, only each by itself, because others matter more: {names}.")
     if len(result.model.ways) > 1:
         told.append("Also run with the reactions at the front edges of the bearings, since the beam overhangs.")
     if "/section/stiffness" not in result.readings.measured:
@@ -214,11 +214,13 @@ def path_name(record: Record, path: str) -> str:
     return " ".join(p for p in parts if not p.isdigit())
 
 
-def decisions(result: Result) -> list[dict[str, Any]]:
+def decisions(result: Result, now: str | None) -> list[dict[str, Any]]:
     """The decisions a person may pick, with those that the outcome rules out; nothing is preselected (J24)."""
-    out = ruled_out(result.outcome)
+    old = lapsed(result.record["found_at"], result.record["valid_until"], now)
+    out = ruled_out(result.outcome, old=old)
+    why = f"ruled out: {'as found earlier, look again' if old else result.outcome.title}"
     return [{"id": d["id"], "label": d["label"], "help": d["help"], "ruled_out": d["id"] in out,
-             "why": f"ruled out: {result.outcome.title}" if d["id"] in out else ""} for d in words()["decisions"]]
+             "why": why if d["id"] in out else ""} for d in words()["decisions"]]
 
 
 def clear_area(result: Result) -> dict[str, list[str]] | None:

@@ -16,6 +16,7 @@ SupportKind = Literal["bearing", "pinned", "fixed", "spring"]
 MAX_SPANS = 200
 SHORTEST = 1e-3  # m; nearer than a millimetre, two things on a beam are in one place: a tape cannot part them
 LONGEST = 1e3  # m
+ROUNDED = 1.0 - 1e-6  # a millimetre between two places far from the left end is a millimetre
 
 
 def finite(value: float, field: str, what: str, largest: float = 1e15) -> float:
@@ -76,7 +77,7 @@ class Stretch:
     def __post_init__(self) -> None:
         finite(self.start, "start", "The start of a stretch", LONGEST)
         finite(self.end, "end", "The end of a stretch", LONGEST)
-        if self.end - self.start < SHORTEST:
+        if self.end - self.start < SHORTEST * ROUNDED:
             raise InputError(code="short_stretch", field="length",
                              message=f"A stretch of {self.end - self.start:.4f} m is too short. Give at least 1 mm.")
         if finite(self.bending_stiffness, "stiffness", "The stiffness EI") <= 0.0:
@@ -110,7 +111,7 @@ class Beam:
         for i, support in enumerate(self.supports):
             within(support.x, 0.0, self.length, f"supports/{i}", "A support")
         for i, (a, b) in enumerate(pairwise(self.supports)):
-            if b.x - a.x < SHORTEST:
+            if b.x - a.x < SHORTEST * ROUNDED:
                 raise InputError(code="span", field=f"spans/{i}",
                                  message=f"The span between two supports is {b.x - a.x:g} m. It must be more than zero, "
                                          "with the supports in order from the left.")

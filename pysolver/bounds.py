@@ -1,12 +1,14 @@
 """What is the worst when lengths and positions lie anywhere in their ranges?
 
 Loads enter through the sign of their influence (envelope.py). Lengths and positions do not act linearly, so they are
-searched: the corners of the box, the middles of its sides, and from the worst point found for each criterion a climb
-along every variable through the inside of its range, since a worst case may lie between the corners (J15: a stack
-somewhere between 2 and 4 m of a 6 m span is worst at 3 m). A search is no proof: what comes out is marked "searched".
+searched: a grid of the box (its corners, and levels inside for wide ranges), the middles of its sides, and from the worst
+point found for each criterion a climb through the inside of wide ranges, since a worst case may lie between the corners
+(J15: a stack somewhere between 2 and 4 m of a 6 m span is worst at 3 m). Inside a range of a few millimetres a stationary
+point gains only the square of that little. At most eight variables are varied together; each of the rest goes to the end
+that alone makes a criterion worse. A search is no proof: the result says "searched".
 """
 
-from collections.abc import Callable
+from collections.abc import Callable, Sequence
 from dataclasses import dataclass
 from itertools import product
 
@@ -15,74 +17,111 @@ from numpy.typing import NDArray
 
 Floats = NDArray[np.float64]
 
-MOST_VARIED = 8  # more uncertain lengths and positions than these are named as not varied
-FULL_GRID = 4  # up to so many variables also get their middle values: 3^4 points
-CLIMBS = 5
+TOGETHER = 8  # uncertain lengths and positions varied together; more are named
+GRID = 700  # points of the grid at most
+LEVELS = (3, 5)  # of a wide range, as far as the grid allows
+CLIMBS = 8
 STEPS = np.array([-1.0, -0.4, -0.1, 0.1, 0.4, 1.0])
-GAIN = 1e-6  # of a ratio: smaller gains end the climb
-WORTH_CLIMBING = 0.5  # a criterion below half of its limit at every corner, side and middle is left there
+GAIN = 1e-5  # of the value: smaller gains end the climb
 
 Evaluate = Callable[[Floats], Floats]
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Searched:
-    """For each of K criteria the largest value found, and the point (n,) of the box where it was found."""
+    """For each of K criteria the largest value found, and the point (n,) of the box where it was found; and which of the
+    variables were varied together."""
 
     worst: Floats
     points: Floats
+    together: tuple[int, ...]
 
 
-def search(evaluate: Evaluate, low: Floats, best: Floats, high: Floats) -> Searched:
-    """evaluate(points (C, n)) -> values (C, K), called with points of the box [low, high]; best is one of them."""
-    points = _starts(low, best, high)
+def search(evaluate: Evaluate, low: Floats, best: Floats, high: Floats, *, wide: NDArray[np.bool_],
+           starts: Floats) -> Searched:
+    """evaluate(points (C, n)) -> values (C, K), called with points of the box [low, high]; best is one of them.
+
+    wide (n,): whose range is wide. starts (m, n): further points to begin from.
+    """
+    ends = _ends(evaluate, low, best, high)
+    together = _most_telling(ends)
+    found = _best_of(evaluate, np.concatenate([_starts(low, best, high, together, wide), starts]), None)
+    rest = np.array([i not in together for i in range(len(low))], bool)
+    if rest.any():
+        worse_end = np.where(ends[1] > ends[0], high[:, None], low[:, None]).T
+        found = _best_of(evaluate, np.where(rest, worse_end, found[1]), found)
+    worst, at = _climb(evaluate, found, low, high, wide)
+    return Searched(worst=worst, points=at, together=tuple(together))
+
+
+Found = tuple[Floats, Floats]  # for each criterion the largest value (K,) and its point (K, n)
+
+
+def _best_of(evaluate: Evaluate, points: Floats, before: Found | None) -> Found:
     values = evaluate(points)
     top = values.argmax(axis=0)
     worst, at = values[top, np.arange(values.shape[1])], points[top]
-    climbing = worst >= WORTH_CLIMBING if len(low) else np.zeros(len(worst), bool)
+    if before is None:
+        return worst, at
+    better = worst > before[0]
+    return np.where(better, worst, before[0]), np.where(better[:, None], at, before[1])
+
+
+def _ends(evaluate: Evaluate, low: Floats, best: Floats, high: Floats) -> tuple[Floats, Floats, Floats]:
+    """(n, K) at the low end and at the high end of each variable alone, and (1, K) at best."""
+    n = len(low)
+    points = np.tile(best, (2 * n + 1, 1))
+    points[np.arange(n), np.arange(n)] = low
+    points[n + np.arange(n), np.arange(n)] = high
+    values = evaluate(points)
+    return values[:n], values[n:2 * n], values[2 * n:]
+
+
+def _most_telling(ends: tuple[Floats, Floats, Floats]) -> list[int]:
+    """The variables whose range, taken alone, changes a criterion most, in their own order."""
+    at_low, at_high, at_best = ends
+    telling = np.maximum(np.abs(at_low - at_best), np.abs(at_high - at_best)).max(axis=1, initial=0.0)
+    return sorted(np.argsort(-telling, kind="stable")[:TOGETHER].tolist())
+
+
+def _climb(evaluate: Evaluate, found: Found, low: Floats, high: Floats, wide: NDArray[np.bool_]) -> Found:
+    """From each criterion's worst point along each wide range, in steps that shrink when nothing is gained."""
+    climbing = np.full(len(found[0]), bool(wide.any()))
     reach = 0.5 * (high - low)
     for _ in range(CLIMBS):
         if not climbing.any():
             break
-        tried = np.unique(_neighbours(np.unique(at[climbing], axis=0), low, high, reach), axis=0)
-        values = evaluate(tried)
-        top = values.argmax(axis=0)
-        found = values[top, np.arange(values.shape[1])]
-        better = found > worst
-        climbing &= found > worst + GAIN
-        worst, at = np.where(better, found, worst), np.where(better[:, None], tried[top], at)
-        reach = 0.45 * reach
-    return Searched(worst=worst, points=at)
+        before = found[0]
+        found = _best_of(evaluate, _neighbours(np.unique(found[1][climbing], axis=0), low, high, reach, wide), found)
+        climbing &= found[0] > before + GAIN * np.abs(before)
+        reach = 0.5 * reach
+    return found
 
 
-def _starts(low: Floats, best: Floats, high: Floats) -> Floats:
+def _starts(low: Floats, best: Floats, high: Floats, together: Sequence[int], wide: NDArray[np.bool_]) -> Floats:
     n = len(low)
-    levels = [[a, 0.5 * (a + b), b] if n <= FULL_GRID else [a, b] for a, b in zip(low, high, strict=True)]
-    chosen = list(product(*levels))
-    corners = np.array(chosen).reshape(len(chosen), n)
+    levels = _levels([i for i in together if wide[i]], together)
+    grid = list(product(*([np.linspace(low[i], high[i], levels[i]).tolist() if i in levels else [best[i]] for i in range(n)])))
     middles = np.tile(best, (n, 1))
     middles[np.arange(n), np.arange(n)] = 0.5 * (low + high)
-    return np.concatenate([best[None, :], corners, middles])
+    return np.concatenate([best[None, :], np.array(grid).reshape(len(grid), n), middles])
 
 
-def _neighbours(at: Floats, low: Floats, high: Floats, reach: Floats) -> Floats:
-    """For each of the K points, a step of each size along each variable, kept in the box."""
-    k, n = at.shape
-    moved = np.repeat(at, n * len(STEPS), axis=0).reshape(k, n, len(STEPS), n)
-    for i in range(n):
-        moved[:, i, :, i] += STEPS * reach[i]
-    result: Floats = np.clip(moved.reshape(-1, n), low, high)
-    return result
+def _levels(wide: Sequence[int], together: Sequence[int]) -> dict[int, int]:
+    """How many values of each variable the grid has: its ends, and more inside wide ranges as far as it may grow."""
+    levels = dict.fromkeys(together, 2)
+    for count in LEVELS:
+        for i in wide:
+            if np.prod(list(levels.values())) / levels[i] * count <= GRID:
+                levels[i] = count
+    return levels
 
 
-def most_telling(evaluate: Evaluate, low: Floats, best: Floats, high: Floats, most: int = MOST_VARIED) -> list[int]:
-    """The variables whose range, taken alone, changes the criteria most: at most `most` of them, in their own order."""
-    n = len(low)
-    if n <= most:
-        return list(range(n))
-    points = np.tile(best, (2 * n, 1))
-    points[np.arange(n), np.arange(n)] = low
-    points[n + np.arange(n), np.arange(n)] = high
-    change = np.abs(evaluate(points) - evaluate(best[None, :])).max(axis=1)
-    telling = np.maximum(change[:n], change[n:])
-    return sorted(np.argsort(-telling, kind="stable")[:most].tolist())
+def _neighbours(at: Floats, low: Floats, high: Floats, reach: Floats, wide: NDArray[np.bool_]) -> Floats:
+    """For each of the K points a step of each size along each wide range, kept in the box."""
+    moved = []
+    for i in np.nonzero(wide)[0]:
+        near = np.repeat(at, len(STEPS), axis=0)
+        near[:, i] = np.clip((at[:, i, None] + STEPS * reach[i]).ravel(), low[i], high[i])
+        moved.append(near)
+    return np.unique(np.concatenate(moved), axis=0)

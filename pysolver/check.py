@@ -10,22 +10,17 @@ worked out all the same are worked out (J23). SI units and signs as in statics.p
 from dataclasses import dataclass
 from typing import Any
 
-import numpy as np
-
 from pysolver.combinations import sets
-from pysolver.envelope import along as effect_along
 from pysolver.errors import InputError
 from pysolver.facts import Gap, distressed, gaps
 from pysolver.found import missing
 from pysolver.governing import LIFTS, Governed, govern, infinite_hold_down, least_reaction, total_load
-from pysolver.limits import capacity_at, set_of
+from pysolver.limits import set_of
 from pysolver.model import Model, model, stiffness_known, stiffness_needed
 from pysolver.outcome import Compared, Outcome, decide
 from pysolver.readings import Readings, read_all
-from pysolver.record import Record, validated
-from pysolver.statics import Response, extremes, solve
-
-NEGLIGIBLE = 1e-9  # share of the largest effect below which an effect counts as zero (rounding)
+from pysolver.record import Record, contradictions, validated
+from pysolver.statics import Response, solve
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -50,7 +45,7 @@ def run_check(document: Any, *, full: bool = True) -> Result:
     """
     record = validated(document)
     readings = read_all(record)
-    unfinished = [*blocking(readings), *missing(record, readings), *stiffness_asked(record, readings)]
+    unfinished = [*contradictions(record), *blocking(readings), *missing(record, readings), *stiffness_asked(record, readings)]
     if unfinished:
         return _unfinished(record, readings, unfinished)
     try:
@@ -62,8 +57,9 @@ def run_check(document: Any, *, full: bool = True) -> Result:
     except InputError as error:
         return _unfinished(record, readings, [error])
     compared = (*governed.compared, *infinite_hold_down(ready, governed.best, governed.least))
-    outcome = decide(compared, facts, distressed=distressed(record), uncovered=uncovered(ready, governed, response),
-                     lifting=lifting(ready, governed), from_memory=_from_memory(record))
+    outcome = decide(compared, facts, distressed=distressed(record), uncovered=uncovered(ready, governed),
+                     lifting=lifting(ready, governed), lifts_now=lifts_now(ready, governed, response),
+                     from_memory=_from_memory(record))
     return Result(record=record, readings=readings, errors=(*readings.errors, *ready.errors), outcome=outcome,
                   compared=compared, model=ready, governed=governed, response=response, full=full)
 
@@ -83,7 +79,7 @@ def stiffness_asked(record: Record, readings: Readings) -> list[InputError]:
 
 def _unfinished(record: Record, readings: Readings, wrong: list[InputError]) -> Result:
     found = [Gap(text=error.message.rstrip("."), who="you, from where you stand", path=error.field) for error in wrong]
-    outcome = decide([], found, distressed=distressed(record), uncovered=[], lifting=[], from_memory=False)
+    outcome = decide([], found, distressed=distressed(record), uncovered=[], lifting=[], lifts_now=False, from_memory=False)
     known = {(e.field, e.message) for e in readings.errors}
     errors = (*readings.errors, *(e for e in wrong if (e.field, e.message) not in known and e.code != "missing"))
     return Result(record=record, readings=readings, errors=errors, outcome=outcome)
@@ -102,7 +98,7 @@ def lifting(ready: Model, governed: Governed) -> list[Gap]:
         support = ready.record["supports"][j]
         if support["kind"] != "bearing":
             continue
-        share = min(governed.least.get(j, 0.0), float(least_reaction(governed.best, ready, j, best=True)[0]) / size)
+        share = min(governed.least.get(j, 0.0), least_reaction(governed.best, ready, j, at_best=True) / size)
         if share < -LIFTS:
             found.append(Gap(text=f"the end at {support['name']} would lift" if j in (0, len(ready.record["supports"]) - 1)
                              else f"the beam would lift off {support['name']}",
@@ -110,43 +106,19 @@ def lifting(ready: Model, governed: Governed) -> list[Gap]:
     return found
 
 
-def uncovered(ready: Model, governed: Governed, response: Response) -> list[Gap]:
-    """J22: sagging, hogging and shear must each have a limit wherever their effect is not zero."""
+def lifts_now(ready: Model, governed: Governed, response: Response) -> bool:
+    """Whether a bearing opens under the load as it is, unfactored: over, by J20."""
+    kinds = [ready.record["supports"][j]["kind"] for j in governed.best.layouts[0].real]
+    size = total_load(governed.best)
+    return any(kind == "bearing" and r < -LIFTS * size for kind, r in zip(kinds, response.reactions, strict=True))
+
+
+def uncovered(ready: Model, governed: Governed) -> list[Gap]:
+    """J22: sagging, hogging and shear must each have a limit wherever their effect is not zero, in any case and corner."""
     words = {"sagging": "sagging moment", "hogging": "hogging moment", "shear": "shear"}
     found = []
-    for kind, name in words.items():
-        where = _without_limit(ready, governed, response, kind)
-        if where is not None:
-            has_any = any(one.criterion.kind == kind for one in ready.judged)
-            place = f" at {where:.2f} m from the left end" if has_any else ""
-            found.append(Gap(text=f"no limit given for {name}{place}", who="the office that issued the limits", path="/limits"))
+    for kind, place in governed.uncovered.items():
+        has_any = any(one.criterion.kind == kind for one in ready.judged)
+        found.append(Gap(text=f"no limit given for {words[kind]}" + (f" {place}" if has_any else ""),
+                         who="the office that issued the limits", path="/limits"))
     return found
-
-
-def _without_limit(ready: Model, governed: Governed, response: Response, kind: str) -> float | None:
-    """The place (m) of the largest effect of a kind where no criterion has a capacity; None when there is none."""
-    layout = governed.best.layouts[0]
-    limits = [one.criterion for one in ready.judged if one.criterion.kind == kind]
-    low, high = _effect_ends(ready, governed, kind)
-    x = governed.best.batch.x[0]
-    size = max(abs(e.value) for e in extremes(response, "shear" if kind == "shear" else "moment"))
-    worst, place = NEGLIGIBLE * max(size, float(high.max(initial=0.0))), None
-    for p, middle in enumerate(0.5 * (x[:-1] + x[1:])):
-        if all(capacity_at(c, float(middle), layout) is None for c in limits):
-            effect = max(float(low[p]), float(high[p]))
-            if effect > worst:
-                worst, place = effect, float(middle)
-    return place
-
-
-def _effect_ends(ready: Model, governed: Governed, kind: str) -> tuple[Any, Any]:
-    """(P,), (P,) a bound of the effect on each piece: all sources at the ends of their ranges, places along the piece."""
-    batch = governed.best.batch
-    coefficients = {"sagging": batch.moment, "hogging": -batch.moment, "shear": batch.shear}[kind]
-    lengths = np.diff(batch.x, axis=1)
-    s = np.linspace(0.0, 1.0, 5) * lengths[..., None]
-    low = np.array([0.0 for _ in ready.sources])
-    high = np.array([source.high for source in ready.sources])
-    up = effect_along(coefficients, s, low, high)[0].max(axis=1)
-    down = effect_along(-coefficients, s, low, high)[0].max(axis=1) if kind == "shear" else up
-    return down, up

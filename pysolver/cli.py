@@ -1,10 +1,11 @@
 """The same check from a terminal: python -m pysolver check FILE.json, link FILE.json, open LINK.
 
-Exit codes: 0 within; 1 close; 2 wrong use of the command; 3 over, or treated as over; 4 cannot be judged; 5 clear the
+Exit codes: 0 within; 1 close; 2 wrong use of the command; 3 over, or treated as over; 4 cannot be judged, or lapsed; 5 clear the
 area; 6 the file or link cannot be read; 7 (open) the recomputed numbers differ from the recorded ones; 70 our fault.
 """
 
 import argparse
+import io
 import json
 import sys
 from collections.abc import Callable, Sequence
@@ -31,6 +32,9 @@ class _CommandError(Exception):
 
 def main(arguments: Sequence[str] | None = None) -> int:
     """Run one command; returns the exit code."""
+    for stream in (sys.stdout, sys.stderr):
+        if isinstance(stream, io.TextIOWrapper):
+            stream.reconfigure(errors="backslashreplace")  # a name from a stranger may hold what no terminal shows
     chosen = _parser().parse_args(arguments)
     run: Callable[[argparse.Namespace], int] = chosen.run
     try:
@@ -81,6 +85,8 @@ def _record(path: str) -> Any:
         raise _CommandError(f"{path} is larger than {MAX_FILE} bytes, which no record is.", UNREADABLE)
     try:
         document = json.loads(raw)
+    except RecursionError:
+        raise _CommandError(f"{path} is nested deeper than any record.", UNREADABLE) from None
     except ValueError as error:
         raise _CommandError(f"{path} is not JSON: {error}. Export the record again.", UNREADABLE) from None
     return document["record"] if isinstance(document, dict) and "record" in document else document
@@ -99,6 +105,8 @@ def _check(chosen: argparse.Namespace) -> int:
 
 def _exit_code(answer: dict[str, Any]) -> int:
     word = answer["outcome"]["word"]
+    if answer["outcome"]["lapsed"] and word in ("within", "close"):
+        return EXIT["cannot"]
     return EXIT["over"] if word == "cannot" and answer["outcome"]["treated_as_over"] else EXIT[word]
 
 

@@ -6,7 +6,7 @@ limit covers enter its ratio (J2); its basis chooses the factors (J4). SI units,
 """
 
 from collections.abc import Sequence
-from dataclasses import dataclass, field
+from dataclasses import dataclass, field, replace
 
 import numpy as np
 from numpy.typing import NDArray
@@ -122,6 +122,20 @@ def capacities(along: Along, one: Judged) -> Floats:
     return capacity
 
 
+def without_limit(along: Along, kind: str, all_judged: Sequence[Judged], low: Floats, high: Floats) -> Worst:
+    """The largest effect (its ratio is to one N or N·m) of a kind on those pieces for which no sheet has a limit."""
+    limits = [capacities(along, replace(one, at_face=False)) for one in all_judged if one.criterion.kind == kind]
+    covered = np.isfinite(limits).any(axis=0) if limits else np.zeros(np.diff(along.batch.x, axis=1).shape, bool)
+    open_pieces = np.where(covered, np.inf, 1.0)
+    if covered.all():
+        nothing, first = np.zeros(len(covered)), np.zeros(len(covered), np.intp)
+        return Worst(ratio=nothing, effect=nothing, piece=first, s=nothing, case=first)
+    if kind == "shear":
+        return _of_either_sign(along.influence("shear"), low, high, open_pieces)
+    name, sign = QUANTITY[kind]
+    return worst(along.influence(name), sign, low, high, open_pieces)
+
+
 def from_chord(along: Along) -> Floats:
     """(C, P, S, 6) sag measured from the chord between displaced supports (J33): an overhang from the chord of its
     neighbour produced, a cantilever from the level of its support."""
@@ -149,15 +163,6 @@ def _sag_at(batch: Batch, places: Floats) -> Floats:
     rows = np.arange(len(places))[:, None]
     value: Floats = piecewise.evaluate(batch.sag[rows, piece], (places - batch.x[rows, piece])[..., None])
     return value
-
-
-def smallest_reactions(along: Along, chosen: Sequence[Case], sources: Sequence[Source], *, best: bool) -> Floats:
-    """(C, J) the least upward reaction of each support over all cases and all sources' ranges."""
-    low, high = ranges(chosen, sources, best=best)
-    r = along.batch.reactions
-    sums = [np.minimum(r * lo, r * hi).sum(axis=2) for lo, hi in zip(low, high, strict=True)]
-    smallest: Floats = np.min(sums, axis=0)
-    return smallest
 
 
 def chunks(total: int, along_one: Along) -> int:

@@ -70,12 +70,6 @@ def worst(of: Influence, sign: float, low: Floats, high: Floats, capacity: Float
     return best
 
 
-def along(coefficients: Floats, s: Floats, low: Floats, high: Floats) -> Floats:
-    """(C, P, n) the largest effect of one case at given places s (C, P, n); low, high (S,)."""
-    values = piecewise.evaluate(np.swapaxes(coefficients, 1, 2)[:, :, :, None, :], s[:, None])
-    return _sum_by_sign(values, low, high)
-
-
 def _sum_by_sign(values: Floats, low: Floats, high: Floats) -> Floats:
     """values (C, S, P, n) -> (C, P, n): each source at the end of its range that makes the sum largest."""
     total: Floats = np.maximum(values * low[:, None, None], values * high[:, None, None]).sum(axis=1)

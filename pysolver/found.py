@@ -9,7 +9,7 @@ from dataclasses import dataclass
 from itertools import pairwise
 from typing import Any
 
-from pysolver.beam import Beam, Stretch
+from pysolver.beam import SHORTEST, Beam, Stretch
 from pysolver.errors import InputError
 from pysolver.frame import Frame, Pick, Reading
 from pysolver.loads import AppliedMoment, LineLoad, Load, PointLoad
@@ -125,13 +125,19 @@ def lay_out(record: Record, readings: Readings, pick: Pick, reading: Reading) ->
     frame = Frame(record, readings, pick, reading)
     beam = _in_record(record, lambda: Beam(length=frame.length, supports=frame.beam_supports(),
                                            stretches=_stretches(record, readings, pick, frame),
-                                           hinges=tuple(frame.place(h["position"], f"/hinges/{i}/position", 0.0)[0]
+                                           hinges=tuple(_hinge(frame, h["position"], f"/hinges/{i}/position")
                                                         for i, h in enumerate(record["hinges"]))))
     loads = tuple(_loads(record, readings, pick, frame))
     return Layout(beam=beam, loads=loads, supports=tuple(frame.x), real=frame.real, faces=tuple(frame.faces),
                   spans=tuple(pairwise(frame.x)), zones=_zones(record, readings, frame),
                   drawn={i: readings.issued[f"/spans/{i}/drawn"] for i in range(len(record["spans"]))
                          if f"/spans/{i}/drawn" in readings.issued})
+
+
+def _hinge(frame: Frame, position: dict[str, Any], path: str) -> float:
+    """x of a hinge; one that a tape cannot part from a support is on it."""
+    x = frame.place(position, path, 0.0)[0]
+    return next((frame.x[j] for j in frame.real if abs(frame.x[j] - x) < SHORTEST), x)
 
 
 def _zones(record: Record, readings: Readings, frame: Frame) -> dict[str, tuple[float, float]]:

@@ -10,7 +10,7 @@ from collections.abc import Callable
 from dataclasses import dataclass
 from typing import Any
 
-from pysolver.beam import Support
+from pysolver.beam import SHORTEST, Support
 from pysolver.errors import InputError
 from pysolver.readings import Readings
 from pysolver.record import Record
@@ -42,8 +42,8 @@ class Frame:
         self.record, self.pick, self.reading, self.readings = record, pick, reading, readings
         count = len(record["supports"])
         self.bearing = [self._bearing(j) for j in range(count)]
-        self.left = self._or_zero("/overhangs/left")
-        self.right = self._or_zero("/overhangs/right")
+        self.left = self._overhang("left")
+        self.right = self._overhang("right")
         middle = [self.left]
         for i, span in enumerate(record["spans"]):
             length = pick(f"/spans/{i}/length")
@@ -60,6 +60,11 @@ class Frame:
             return self.pick(path)
         except KeyError:
             return 0.0
+
+    def _overhang(self, end: str) -> float:
+        """What a range may take below nothing, or below what a tape can tell from nothing, is no overhang."""
+        length = self._or_zero(f"/overhangs/{end}")
+        return length if length >= SHORTEST else 0.0
 
     def _bearing(self, j: int) -> float:
         path = f"/supports/{j}/bearing"

@@ -5,36 +5,45 @@ criterion becomes one Compared with places in words. Effects in SI, signs as in 
 """
 
 import math
-from collections.abc import Sequence
+from collections.abc import Iterator, Sequence
 from dataclasses import dataclass, replace
 
 import numpy as np
 from numpy.typing import NDArray
 
 from pysolver import piecewise
-from pysolver.bounds import most_telling, search
-from pysolver.combinations import Case
-from pysolver.comparison import Along, Judged, chunks, compare, factor_ranges, ratio_of, smallest_reactions
+from pysolver.bounds import search
+from pysolver.combinations import ranges
+from pysolver.comparison import Along, Judged, chunks, compare, factor_ranges, ratio_of, solve_layouts, without_limit
 from pysolver.envelope import Worst
 from pysolver.facts import Gap
-from pysolver.found import Layout, span_name
+from pysolver.found import SELF_WEIGHT, Layout, span_name
 from pysolver.frame import Reading
+from pysolver.limits import STRENGTH
+from pysolver.loads import LineLoad
 from pysolver.model import Model
 from pysolver.outcome import Compared
 from pysolver.record import Record
+from pysolver.stiffness import shape_of
+from pysolver.uplift import every_case, least_reactions
 
 Floats = NDArray[np.float64]
 
+WIDE = 0.02
+GATHERINGS = 25
+NEGLIGIBLE = 1e-9  # of the load (times the length, for moments): rounding
 LIFTS = 1e-9  # share of the load below which a negative reaction is rounding
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class Governed:
-    """compared: one entry per criterion; least: least reaction of each support, worst case (share of the load, by index);
+    """compared: one entry per criterion; uncovered: kinds of effect that no sheet limits where they occur, with the place
+    of the largest (J22); least: least reaction of each support, worst case (share of the load, by index);
     varied, not_varied: paths of uncertain lengths and positions."""
 
     compared: tuple[Compared, ...]
     least: dict[int, float]
+    uncovered: dict[str, str]
     varied: tuple[str, ...]
     not_varied: tuple[str, ...]
     best: Along
@@ -47,14 +56,15 @@ def govern(model: Model, gaps: Sequence[Gap], *, full: bool) -> Governed:
     plain = [_worst_way(model, one, best, best_only=True) for one in model.judged]
     if not full:
         compared = [_compared(model, one, b, None, gaps, searched=False) for one, b in zip(model.judged, plain, strict=True)]
-        return Governed(compared=tuple(compared), least={}, varied=(), not_varied=(), best=best[model.ways[0]])
+        return Governed(compared=tuple(compared), least={}, uncovered=_uncovered(model, best[model.ways[0]]), varied=(),
+                        not_varied=(), best=best[model.ways[0]])
     search_ = _Search(model, best[model.ways[0]])
     worst = [_worst_way(model, one, {way: model.solved(p[None, :], _loose(way)) for way in model.ways}, best_only=False)
              for one, p in zip(model.judged, search_.points, strict=False)]
     compared = [_compared(model, one, b, w, gaps, searched=bool(search_.varied))
                 for one, b, w in zip(model.judged, plain, worst, strict=True)]
-    return Governed(compared=tuple(compared), least=search_.least, varied=search_.varied, not_varied=search_.not_varied,
-                    best=best[model.ways[0]])
+    return Governed(compared=tuple(compared), least=search_.least, uncovered=search_.uncovered, varied=search_.varied,
+                    not_varied=search_.not_varied, best=best[model.ways[0]])
 
 
 @dataclass(frozen=True, slots=True)
@@ -83,38 +93,89 @@ class _Search:
         self.supports = best.layouts[0].real
         low, high = (np.array([getattr(model.readings.measured[v], end) for v in model.variables]) for end in ("low", "high"))
         point = model.best_point()
-        used = most_telling(self.evaluate, low, point, high)
-        low, high = (np.where(np.isin(np.arange(len(point)), used), end, point) for end in (low, high))
-        found = self._search(low, point, high, used)
-        self.varied = tuple(model.variables[i] for i in used)
-        self.not_varied = tuple(v for i, v in enumerate(model.variables) if i not in used)
-        self.points = found[1][:len(model.judged)]
-        lifts = found[0][len(model.judged):]
+        wide = wide_ranges(model, best, low, high)
+        found = search(self.evaluate, low, point, high, wide=wide, starts=self._gathered(low, high, wide))
+        self.varied = tuple(model.variables[i] for i in found.together)
+        self.not_varied = tuple(v for i, v in enumerate(model.variables) if i not in found.together)
+        self.points = found.points[:len(model.judged)]
+        lifts = found.worst[len(model.judged):len(model.judged) + len(self.supports)]
         self.least = {j: -float(v) for j, v in zip(self.supports, lifts, strict=True)}
+        self.uncovered: dict[str, str] = {}
+        for point in found.points[-len(STRENGTH):]:
+            self.uncovered |= _uncovered(model, model.solved(point[None, :], _loose(model.ways[0])))
 
-    def _search(self, low: Floats, point: Floats, high: Floats, used: list[int]) -> tuple[Floats, Floats]:
-        def widened(p: Floats) -> Floats:
-            whole = np.tile(point, (len(p), 1))
-            whole[:, used] = p
-            return whole
-
-        found = search(lambda p: self.evaluate(widened(p)), low[used], point[used], high[used])
-        return found.worst, widened(found.points)
+    def _gathered(self, low: Floats, high: Floats, wide: NDArray[np.bool_]) -> Floats:
+        """(m, n) points at which all loads of uncertain place stand as near to one place as they can: loads moved one at a
+        time would not find it. One such place for each of GATHERINGS along the beam."""
+        model, loads = self.model, [i for i, v in enumerate(self.model.variables) if wide[i] and is_place_of_load(v)]
+        if len(loads) < 2:
+            return np.zeros((0, len(low)))
+        ends = [model.layouts(end[None, :], _loose(model.ways[0]))[0] for end in (low, high)]
+        points = np.tile(model.best_point(), (GATHERINGS, 1))
+        for i in loads:
+            a, b = (middle_of(lay, model.variables[i]) for lay in ends)
+            if a != b:
+                share = np.clip((np.linspace(0.0, ends[0].beam.length, GATHERINGS) - a) / (b - a), 0.0, 1.0)
+                points[:, i] = low[i] + share * (high[i] - low[i])
+        return points
 
     def evaluate(self, points: Floats) -> Floats:
-        """(C, K + J): the worst ratio of each criterion, then the uplift at each support as a share of the load."""
-        rows = [self._chunk(points[i:i + self.step]) for i in range(0, len(points), self.step)]
-        return np.concatenate(rows)
-
-    def _chunk(self, points: Floats) -> Floats:
-        ways = []
+        """(C, K + J + 3): the worst ratio of each criterion, the uplift at each support, and the effects without a limit, the
+        latter two as shares of the load."""
+        worst = np.full((len(points), len(self.model.judged) + len(self.supports) + len(STRENGTH)), -np.inf)
         for way in self.model.ways:
-            along = self.model.solved(points, _loose(way))
-            columns = [compare(along, one, self.model.sources, best=False).ratio for one in self.model.judged]
-            lifts = [-least_reaction(along, self.model, j, best=False) / self.size for j in self.supports]
-            ways.append(np.stack([*columns, *lifts], axis=1) if columns or lifts else np.zeros((len(points), 0)))
-        worst: Floats = np.max(ways, axis=0)
+            layouts = self.model.layouts(points, _loose(way))
+            for rows in _alike(layouts, self.step):
+                worst[rows] = np.maximum(worst[rows], self._of_one_shape([layouts[i] for i in rows]))
         return worst
+
+    def _of_one_shape(self, layouts: list[Layout]) -> Floats:
+        along = solve_layouts(layouts)
+        ratios = [compare(along, one, self.model.sources, best=False).ratio for one in self.model.judged]
+        least = least_reactions(self.model, layouts, every_case(self.model), best=False)
+        effects = [worst.ratio / self.size for worst in _without_limit(self.model, along).values()]
+        return np.concatenate([np.array(ratios).reshape(len(ratios), len(layouts)).T, -least / self.size,
+                               np.array(effects).T], axis=1)
+
+
+def _without_limit(model: Model, along: Along) -> dict[str, Worst]:
+    low, high = ranges(every_case(model), model.sources, best=False)
+    return {kind: without_limit(along, kind, model.judged, low, high) for kind in STRENGTH}
+
+
+def _uncovered(model: Model, along: Along) -> dict[str, str]:
+    """The kinds of effect that occur where no sheet has a limit for them, with the place of the largest."""
+    size, layout = total_load(along), along.layouts[0]
+    return {kind: place_name(model.record, layout, float(along.batch.x[0, worst.piece[0]] + worst.s[0]))
+            for kind, worst in _without_limit(model, along).items()
+            if worst.ratio[0] > NEGLIGIBLE * size * (1.0 if kind == "shear" else layout.beam.length)}
+
+
+def _alike(layouts: Sequence[Layout], most: int) -> Iterator[list[int]]:
+    """Indices of layouts of one shape, at most `most` at a time: a range may move a hinge past a support."""
+    shapes: dict[tuple[tuple[bool, int], ...], list[int]] = {}
+    for i, layout in enumerate(layouts):
+        shapes.setdefault(shape_of(layout.beam), []).append(i)
+    for rows in shapes.values():
+        yield from (rows[k:k + most] for k in range(0, len(rows), most))
+
+
+def is_place_of_load(path: str) -> bool:
+    return path.startswith("/loads/") and path.endswith("/position/distance")
+
+
+def middle_of(layout: Layout, path: str) -> float:
+    """x (m) of the middle of the load whose place a path measures. Loads follow the beam's own weight, if that is there."""
+    index = int(path.split("/")[2]) + (1 if layout.loads and layout.loads[0].source == SELF_WEIGHT else 0)
+    load = layout.loads[index]
+    return 0.5 * (load.start + load.end) if isinstance(load, LineLoad) else load.x
+
+
+def wide_ranges(model: Model, best: Along, low: Floats, high: Floats) -> NDArray[np.bool_]:
+    """(n,) which ranges are wide: lengths that may be out by more than WIDE of the beam. A stiffness acts one way."""
+    is_length = np.array([model.readings.measured[v].dimension in ("length", "small_length") for v in model.variables], bool)
+    wide: NDArray[np.bool_] = is_length & (high - low > WIDE * best.layouts[0].beam.length)
+    return wide
 
 
 def total_load(along: Along) -> float:
@@ -122,21 +183,10 @@ def total_load(along: Along) -> float:
     return max(float(np.abs(along.batch.reactions).sum()), 1e-300)
 
 
-def every_case(model: Model) -> list[Case]:
-    """All cases of all sets in use: a bearing must stay down in each of them."""
-    return [case for one in model.judged for case in one.cases] or [_as_they_are(model)]
-
-
-def _as_they_are(model: Model) -> Case:
-    ones = tuple(1.0 for _ in model.sources)
-    return Case(name="all loads as they are", favourable=ones, unfavourable=ones)
-
-
-def least_reaction(along: Along, model: Model, support: int, *, best: bool) -> Floats:
-    """(C,) least upward reaction (N) of a support (index in the record), over all cases, all loads counted."""
-    j = along.layouts[0].real.index(support)
-    least: Floats = smallest_reactions(along, [*every_case(model), _as_they_are(model)], model.sources, best=best)[:, j]
-    return least
+def least_reaction(best: Along, model: Model, support: int, *, at_best: bool) -> float:
+    """Least upward reaction (N) of a support (index in the record) at the best estimate of lengths and positions."""
+    layout = best.layouts[0]
+    return float(least_reactions(model, [layout], every_case(model), best=at_best)[0, layout.real.index(support)])
 
 
 def _compared(model: Model, one: Judged, best: _At, worst: _At | None, gaps: Sequence[Gap], *, searched: bool) -> Compared:
@@ -217,7 +267,7 @@ def infinite_hold_down(model: Model, best: Along, least_worst: dict[int, float])
         if support["kind"] == "bearing" or j in given:
             continue
         size = total_load(best)
-        at_best = float(least_reaction(best, model, j, best=True)[0])
+        at_best = least_reaction(best, model, j, at_best=True)
         at_worst = min(size * least_worst.get(j, 0.0), at_best)
         if at_worst < -LIFTS * size:
             made.append(Compared(

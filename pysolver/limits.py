@@ -46,7 +46,12 @@ def criteria(record: Record, readings: Readings) -> tuple[list[Criterion], list[
     """Every comparison that the record's limits ask for, and what is wrong with entries that give none."""
     found: list[Criterion] = []
     errors: list[InputError] = []
+    known = {load["id"] for load in record["loads"]}
     for i, sheet in enumerate(record["limits"]):
+        if not set(sheet["covers_loads"]) <= known:
+            errors.append(InputError(code="no_load", field=f"/limits/{i}/covers_loads",
+                                     message=f"{name_of_sheet(record, i)} covers a load that is not on the record. Pick its "
+                                             "loads again."))
         grouped: dict[tuple[Any, ...], list[Stretch]] = {}
         for j, entry in enumerate(sheet["entries"]):
             path = f"/limits/{i}/entries/{j}"

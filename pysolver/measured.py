@@ -75,7 +75,7 @@ def _number(text: str, quantity: Mapping[str, Any], dimension: str, field: str) 
 
 def _refuse_other_value(quantity: Mapping[str, Any], best: float, field: str) -> None:
     kept = quantity.get("value")
-    if kept is not None and abs(kept - best) > 1e-9 * max(abs(kept), abs(best)):
+    if kept is not None and not (abs(kept) < 1e300 and abs(kept - best) <= 1e-9 * abs(best)):
         raise InputError(code="value_differs", field=field, message=f"The record says {quantity['text']!r} and beside it "
                          f"the value {kept!r}, which is not the same. Enter the number again.")
 

@@ -11,6 +11,7 @@ from dataclasses import dataclass, replace
 import numpy as np
 from numpy.typing import NDArray
 
+from pysolver.beam import SHORTEST
 from pysolver.combinations import PERMANENT, SETTLED, CombinationSet, Source, own_set, sets
 from pysolver.comparison import Along, Judged, judged, solve_layouts
 from pysolver.errors import InputError
@@ -26,6 +27,7 @@ from pysolver.units import parse
 Floats = NDArray[np.float64]
 
 GEOMETRY = ("length", "small_length", "bending_stiffness", "spring", "rotational_spring")
+OWN_FACTORS = {"permanent": (1.0, 5.0), "permanent_favourable": (0.0, 1.0), "leading": (1.0, 5.0), "accompanying": (0.0, 5.0)}
 TIMES_THE_BASE = "/section/stiffness"
 
 
@@ -146,7 +148,7 @@ def _shares(readings: Readings, paths: Sequence[str]) -> tuple[float, float]:
 
 def _variables(record: Record, readings: Readings, usable: Sequence[Criterion]) -> tuple[str, ...]:
     """Paths of what varies without acting linearly. A stiffness of the whole beam matters only where M depends on it or
-    sag is compared; bearings and depth only where spans were measured clear."""
+    sag is compared, the depth only where spans were measured clear."""
     sag = any(c.kind == "sag" for c in usable)
     clear = any(span["measure"] == "clear" for span in record["spans"])
     chosen = []
@@ -155,7 +157,9 @@ def _variables(record: Record, readings: Readings, usable: Sequence[Criterion]) 
             continue
         if path == TIMES_THE_BASE and not (sag or stiffness_needed(record)):
             continue
-        if (path.endswith("/bearing") or path == "/section/depth") and not clear:
+        if path == "/section/depth" and not clear:
+            continue
+        if path.startswith("/overhangs") and m.best < SHORTEST:
             continue
         chosen.append(path)
     return tuple(chosen)
@@ -196,7 +200,8 @@ def _own_factor(given: dict[str, str], name: str, field: str) -> float:
         value = parse("number", given.get(name, ""), "").value
     except InputError as error:
         raise error.at(field) from None
-    if not 0.0 <= value <= 5.0:
-        raise InputError(code="own_factor", field=field,
-                         message=f"The factor {given.get(name)!r} is not between 0 and 5. Enter it as the office gave it.")
+    low, high = OWN_FACTORS[name]
+    if not low <= value <= high:
+        raise InputError(code="own_factor", field=field, message=f"The factor {given.get(name)!r} is not between {low:g} and "
+                         f"{high:g}. Enter it as the office gave it.")
     return value

@@ -7,9 +7,10 @@ judged, clear the area. Nothing here permits anything: decisions are a person's 
 
 from collections.abc import Sequence
 from dataclasses import dataclass
-from datetime import UTC, datetime, timedelta
+from datetime import datetime, timedelta
 
 from pysolver.facts import Gap
+from pysolver.record import moment
 
 WITHIN, CLOSE, OVER, CANNOT, CLEAR, WORKING = "within", "close", "over", "cannot", "clear", "working"
 SEARCH_MARGIN = 0.98  # J15: a searched worst within 2 % of the limit is close
@@ -102,8 +103,9 @@ class Outcome:
 
 
 def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: bool, uncovered: Sequence[Gap],
-           lifting: Sequence[Gap], from_memory: bool) -> Outcome:
-    """The outcome of a check. uncovered: kinds of effect without a limit (J22); lifting: bearings that would open (J20)."""
+           lifting: Sequence[Gap], lifts_now: bool, from_memory: bool) -> Outcome:
+    """The outcome of a check. uncovered: kinds of effect without a limit (J22); lifting: bearings that would open (J20);
+    lifts_now: one of them under the load as it is, which counts as over."""
     strength = [c for c in compared if c.kind != "sag"]
     every_gap = (*gaps, *lifting, *uncovered)
     over = [c for c in strength if numbers_over(c)]
@@ -128,7 +130,7 @@ def decide(compared: Sequence[Compared], gaps: Sequence[Gap], *, distressed: boo
         return made(CANNOT, "cannot be judged; the numbers alone are over", [g.text for g in every_gap], True)
     if every_gap or not strength or any(state(c) == CANNOT for c in strength):
         first = every_gap[0].text if every_gap else "no limit can be compared"
-        return made(CANNOT, f"cannot be judged: {first}", [g.text for g in every_gap])
+        return made(CANNOT, f"cannot be judged: {first}", [g.text for g in every_gap], lifts_now)
     if any(state(c) == WORKING for c in strength):
         return made(WORKING, "best estimate within; the ranges follow", [])
     near = [c for c in strength if state(c) == CLOSE]
@@ -187,20 +189,21 @@ RULED_OUT = {WITHIN: (), WORKING: (), CLOSE: ("carry_on",), CANNOT: ("carry_on",
              CLEAR: ("carry_on", "hold", "unload")}
 
 
-def ruled_out(outcome: Outcome) -> tuple[str, ...]:
-    """The decisions that the outcome rules out (J24); what is treated as over rules out as much as over."""
+def ruled_out(outcome: Outcome, *, old: bool = False) -> tuple[str, ...]:
+    """The decisions that the outcome rules out (J24); what is treated as over rules out as much as over. old: lapsed, so
+    nobody carries on by it (J26)."""
     if outcome.word != CLEAR and outcome.treated_as_over:
         return RULED_OUT[OVER]
-    return RULED_OUT[outcome.word]
+    return RULED_OUT[outcome.word] or (("carry_on",) if old else ())
 
 
-def what_now(outcome: Outcome, until: str) -> str:
+def what_now(outcome: Outcome, until: str, *, old: bool = False) -> str:
     """The third line of the bar: what the outcome rules out, and what to do meanwhile."""
     if outcome.word == CLEAR:
         return "Everyone away from on and under it, now. Then phone."
     if outcome.treated_as_over:
         return "Rules out holding. Take load off, nobody on or under it, tell the person in charge."
-    if outcome.word in (CLOSE, CANNOT):
+    if outcome.word in (CLOSE, CANNOT) or old:
         return "Rules out carrying on. Hold: add nothing, measure again or phone."
     if outcome.word == WITHIN:
         return f"Nothing here stops the work; nothing moved or added until {until} or any change."
@@ -210,20 +213,12 @@ def what_now(outcome: Outcome, until: str) -> str:
 def valid_until(found_at: str | None, stated: str | None) -> datetime | None:
     """When the outcome lapses (J26): as stated, else VALID_HOURS after it was found; None when neither is given."""
     if stated:
-        return _moment(stated)
-    found = _moment(found_at) if found_at else None
+        return moment(stated)
+    found = moment(found_at) if found_at else None
     return found + timedelta(hours=VALID_HOURS) if found else None
 
 
 def lapsed(found_at: str | None, stated: str | None, now: str | None) -> bool:
     """Whether the outcome is now "as found earlier, look again"."""
-    end, at = valid_until(found_at, stated), _moment(now) if now else None
+    end, at = valid_until(found_at, stated), moment(now) if now else None
     return end is not None and at is not None and at > end
-
-
-def _moment(text: str) -> datetime | None:
-    try:
-        moment = datetime.fromisoformat(text.replace("Z", "+00:00"))
-    except ValueError:
-        return None
-    return moment.replace(tzinfo=UTC) if moment.tzinfo is None else moment

@@ -5,6 +5,8 @@ read before the schema has accepted it. record_validator.py is that schema as Py
 """
 
 import re
+from collections.abc import Iterator
+from datetime import UTC, datetime
 from typing import Any
 
 from fastjsonschema import JsonSchemaValueException
@@ -24,8 +26,9 @@ _PLACE = re.compile(r"data((?:\.\w+|\[\d+\])*) ?(.*)", re.DOTALL)  # how the val
 def validated(document: Any) -> Record:
     """The record itself when the schema and its inner references hold; otherwise InputError with the field."""
     if isinstance(document, dict) and document.get("version", VERSION) != VERSION:
-        raise InputError(code="version", field="/version", message=f"This record has version {document.get('version')!r}; "
-                         f"this app reads version {VERSION}. Open it with the app that made it, or update this one.")
+        raise InputError(code="version", field="/version",
+                         message=f"This record has version {str(document.get('version'))[:40]!r}; this app reads version "
+                                 f"{VERSION}. Open it with the app that made it, or update this one.")
     try:
         record: Record = validate(document)  # type: ignore[no-untyped-call]
     except JsonSchemaValueException as error:
@@ -48,14 +51,56 @@ def _check_references(record: Record) -> None:
     if len(record["supports"]) != len(record["spans"]) + 1:
         raise InputError(code="supports", field="/supports", message=f"{len(record['spans'])} spans need "
                          f"{len(record['spans']) + 1} supports, but {len(record['supports'])} are listed.")
-    for i, support in enumerate(record["supports"][1:-1], start=1):
-        if support["kind"] == "free":
-            raise InputError(code="free_inside", field=f"/supports/{i}/kind", message=f"Support {support['name']} stands between "
-                             "two spans, so it cannot be a free end. Make the two spans one, or say what is under it.")
     for name in ("loads", "limits"):
         ids = [item["id"] for item in record[name]]
         if len(set(ids)) != len(ids):
             raise InputError(code="ids", field=f"/{name}", message=f"Two {name} have the same id. Give each its own.")
+
+
+def contradictions(record: Record) -> list[InputError]:
+    """What a record of the right form says that cannot be: each with its field. Nothing is solved until it is put right."""
+    return [*_free_inside(record), *_no_such_support(record), *_no_such_time(record), *_no_such_photo(record)]
+
+
+def _free_inside(record: Record) -> Iterator[InputError]:
+    for i, support in enumerate(record["supports"][1:-1], start=1):
+        if support["kind"] == "free":
+            yield InputError(code="free_inside", field=f"/supports/{i}/kind", message=f"Support {support['name']} stands between "
+                             "two spans, so it cannot be a free end. Make the two spans one, or say what is under it.")
+
+
+def _no_such_support(record: Record) -> Iterator[InputError]:
+    things = [(f"/loads/{i}/position", load["position"]) for i, load in enumerate(record["loads"]) if not load["whole_beam"]]
+    things += [(f"/hinges/{i}/position", hinge["position"]) for i, hinge in enumerate(record["hinges"])]
+    things += [(f"/section/zones/{i}/position", zone["position"]) for i, zone in enumerate(record["section"]["zones"])]
+    for path, position in things:
+        if position and position["from"] == "support" and (position["support"] or 0) >= len(record["supports"]):
+            yield InputError(code="no_support", field=f"{path}/support",
+                             message="This was measured from a support that the beam does not have. Pick the support again.")
+
+
+def _no_such_time(record: Record) -> Iterator[InputError]:
+    for name in ("found_at", "valid_until"):
+        if record[name] is not None and moment(record[name]) is None:
+            yield InputError(code="time", field=f"/{name}", message=f"{record[name]!r} is no day and time that there is.")
+
+
+def _no_such_photo(record: Record) -> Iterator[InputError]:
+    known = {photo["hash"] for photo in record["photos"]}
+    for i, load in enumerate(record["loads"]):
+        for j, photo in enumerate(load["photos"]):
+            if photo not in known:
+                yield InputError(code="no_photo", field=f"/loads/{i}/photos/{j}", message="This load names a photo "
+                                 "that the record does not list. Take the photo again, or take it off the load.")
+
+
+def moment(text: str) -> datetime | None:
+    """An ISO time (UTC where no zone is given), or None when there is no such time."""
+    try:
+        read = datetime.fromisoformat(text.replace("Z", "+00:00"))
+    except ValueError:
+        return None
+    return read.replace(tzinfo=UTC) if read.tzinfo is None else read
 
 
 def blank() -> Record:

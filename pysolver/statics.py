@@ -44,6 +44,7 @@ Ints = NDArray[np.intp]
 RESIDUAL_ALLOWED = 1e-7  # of the load: beyond it the answer is not trusted (our bug, or a beam too extreme to solve)
 
 NO_FORCE = 1e-3  # N
+SAME = 1e-9  # m
 ROUNDING = 1e-8  # of stiffness times displacement: a beam that follows its settlements freely has no forces but rounding
 
 DEGREE = {"shear": 2, "moment": 3, "slope": 4, "sag": 5}
@@ -105,19 +106,41 @@ def solve(beam: Beam, loads: Sequence[Load], cuts: Sequence[float] = ()) -> Resp
 
 def solve_batch(beams: Sequence[Beam], loads: Sequence[tuple[Load, ...]],
                 cuts: Sequence[tuple[float, ...]] | None = None) -> Batch:
-    """The response of C beams, alike in supports, hinges, stretches and kinds of load, to each of their sources."""
+    """The response of C beams of one shape (stiffness.shape_of) with as many loads each, to each of their sources."""
+    nodes, forces, moved, held = _moved(beams, loads)
+    answer = _pieces(nodes, forces, moved, _breakpoints(nodes, forces, cuts))
+    _refuse_untrusted((answer["moment"], answer["sag"], held.reactions), held.residual)
+    return Batch(sources=held.sources, reactions=held.reactions, fixing_moments=held.fixing_moments, residual=held.residual,
+                 **answer)
+
+
+def solve_reactions(beams: Sequence[Beam], loads: Sequence[tuple[Load, ...]]) -> "Held":
+    """As solve_batch, but only what the supports give."""
+    held = _moved(beams, loads)[3]
+    _refuse_untrusted((held.reactions,), held.residual)
+    return held
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Held:
+    """What the supports of C beams give to each source: see Batch."""
+
+    sources: tuple[str, ...]
+    reactions: Floats
+    fixing_moments: Floats
+    residual: Floats
+
+
+def _moved(beams: Sequence[Beam], loads: Sequence[tuple[Load, ...]]) -> tuple[Nodes, Forces, Floats, Held]:
     refuse_mechanism(beams[0])
     sources = tuple(dict.fromkeys([load.source for load in loads[0]] + settlements(beams)))
     nodes = nodes_of(beams)
     forces = forces_of(loads, sources)
     matrix, right = assemble(nodes, beams[0], forces)
     moved = displacements(nodes, beams, matrix, right, sources)
-    answer = _pieces(nodes, forces, moved, _breakpoints(nodes, forces, cuts))
     reactions, fixing = _reactions(nodes, beams, moved, matrix, right)
-    batch = Batch(sources=sources, reactions=reactions, fixing_moments=fixing,
-                  residual=residual(beams, forces, reactions, fixing, _rounding(matrix, moved)), **answer)
-    _refuse_untrusted(batch)
-    return batch
+    balance = residual(beams, forces, reactions, fixing, _rounding(matrix, moved))
+    return nodes, forces, moved, Held(sources=sources, reactions=reactions, fixing_moments=fixing, residual=balance)
 
 
 def _breakpoints(nodes: Nodes, forces: Forces, cuts: Sequence[tuple[float, ...]] | None) -> Floats:
@@ -227,18 +250,24 @@ def residual(beams: Sequence[Beam], forces: Forces, reactions: Floats, fixing: F
     return worst
 
 
-def _refuse_untrusted(batch: Batch) -> None:
-    arrays = (batch.moment, batch.sag, batch.reactions, batch.residual)
-    if not all(np.isfinite(a).all() for a in arrays):
+def _refuse_untrusted(arrays: Sequence[Floats], balance: Floats) -> None:
+    if not all(np.isfinite(a).all() for a in (*arrays, balance)):
         raise InputError(code="not_solvable", field="", message="These numbers are too extreme to be solved. Check spans, "
                          "stiffnesses and springs for a slip of a unit.")
-    if batch.residual.max() > RESIDUAL_ALLOWED:
-        raise InternalError(code="equilibrium", message=f"The answer is out of equilibrium by {batch.residual.max():.1e} of "
-                            "the load, so it is not shown.")
+    if balance.max() > RESIDUAL_ALLOWED:
+        raise InternalError(code="equilibrium", message=f"The answer is out of equilibrium by {balance.max():.1e} of the load, "
+                            "so it is not shown.")
 
 
 def value(response: Response, quantity: str, x: float, side: str = "right") -> float:
-    """The value of shear, moment, slope or sag at x; at a jump, just to the `side` ("left" or "right") of it."""
+    """The value of shear, moment, slope or sag at x; at a jump, just to the `side` ("left" or "right") of it.
+
+    A place within a nanometre of a breakpoint is that breakpoint. Raises InternalError off the beam.
+    """
+    near = int(np.abs(response.x - x).argmin())
+    x = float(response.x[near]) if abs(response.x[near] - x) < SAME else x
+    if not response.x[0] <= x <= response.x[-1]:
+        raise InternalError(code="off_the_beam", message=f"A value was asked for at {x} m, which is off the beam.")
     if side == "left":
         i = int(np.searchsorted(response.x, x, side="left")) - 1
     else:

@@ -59,6 +59,13 @@ def settlements(beams: Sequence[Beam]) -> list[str]:
     return [SETTLEMENT.format(j) for j in range(len(beams[0].supports)) if any(b.supports[j].settlement for b in beams)]
 
 
+def shape_of(beam: Beam) -> tuple[tuple[bool, int], ...]:
+    """What must be alike for beams to be solved in one batch: for each element end, is it a hinge, which support is it."""
+    places = _node_places(beam)
+    at = {int(np.argmin([abs(s.x - x) for x, _ in places])): j for j, s in enumerate(beam.supports)}
+    return tuple((hinge, at.get(i, -1)) for i, (_, hinge) in enumerate(places))
+
+
 def nodes_of(beams: Sequence[Beam]) -> Nodes:
     shapes = [_node_places(b) for b in beams]
     x = np.array([[place for place, _ in shape] for shape in shapes])

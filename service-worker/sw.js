@@ -119,7 +119,7 @@ worker.addEventListener('install', (event) => event.waitUntil(install()));
 worker.addEventListener('activate', (event) => event.waitUntil(activate()));
 worker.addEventListener('fetch', (event) => {
   const inScope = event.request.method === 'GET' && event.request.url.startsWith(SCOPE);
-  event.respondWith(inScope ? answer(event.request) : Response.error());
+  event.respondWith(inScope ? answer(event.request) : new Response(null, { status: 404 }));
 });
 worker.addEventListener('message', (event) => {
   const { type } = /** @type {import('../web/messages.js').ToServiceWorker} */ (event.data);

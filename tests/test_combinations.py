@@ -81,6 +81,14 @@ def test_own_factors_that_are_no_factors_are_refused_at_their_field(bad: str) ->
     assert [e.field for e in result.errors] == ["/limits/0/own/permanent"]
 
 
+@pytest.mark.parametrize("name", ["permanent", "leading"])
+def test_an_own_factor_below_one_never_makes_a_factored_effect_smaller_than_the_load(name: str) -> None:
+    """A slip of the finger (0 for 1.5) would otherwise be within any limit. No published set has an unfavourable factor of
+    the permanent or the leading load below 1.0 with a factored limit."""
+    own = {"permanent": "1.2", "permanent_favourable": "0.95", "leading": "1.4", "accompanying": "0.9", name: "0"}
+    assert outcome_of(beam(["4.00 m"], limits=[generous(basis="factored", set="own", own=own)])) != "within"
+
+
 def test_own_factors_not_entered_are_never_taken_as_one() -> None:
     result = run_check(beam(["4.00 m"], limits=[generous(basis="factored", set="own")]))
     assert result.outcome.word == "cannot"

@@ -460,13 +460,19 @@ def test_J8_the_effect_of_the_choice_of_span_rule_is_not_hidden() -> None:
     assert any("+3.3 %" in note for note in notes)
 
 
-@pytest.mark.parametrize("found", ["1 mm", "75 mm", "149 mm", "0 mm"])
+@pytest.mark.parametrize("found", ["1 mm", "75 mm", "149 mm"])
 def test_J8_a_bearing_shorter_than_drawn_never_improves_the_ratio(found: str) -> None:
     drawn = one(run_check(clear_span("3.00 m", "150 mm", q("300 mm"), drawn="150 mm")), SAG).ratio
     shorter = one(run_check(clear_span("3.00 m", found, q("300 mm"), drawn="150 mm")), SAG).ratio
     assert shorter is not None
     assert drawn is not None
     assert shorter >= drawn * (1 - EXACT)
+
+
+def test_J8_a_bearing_of_nothing_never_improves_the_ratio() -> None:
+    """Refused, or judged on the bearing that was drawn (3.15 m)."""
+    result = run_check(clear_span("3.00 m", "0 mm", "300 mm", drawn="150 mm"))
+    assert result.outcome.word == "cannot" or one(result, SAG).ratio == pytest.approx(3.15**2 / 900, rel=EXACT)
 
 
 @pytest.mark.parametrize("change", [{"bearing": "-150 mm"}, {"depth": "-300 mm"}])

@@ -29,6 +29,7 @@ from records import (
     strip,
     texts,
     two_spans,
+    zone,
 )
 
 EXACT = 1e-9
@@ -235,6 +236,14 @@ def test_J22_sag_under_added_load_never_counts_the_permanent_load() -> None:
         assert one(run_check(record), "sag").factored == pytest.approx(expected, rel=1e-6)
 
 
+def test_J22_an_effect_that_appears_within_the_ranges_only_never_goes_without_its_limit() -> None:
+    """A load of 14 kN somewhere from 0.5 m inside B to 1.0 m beyond it: there it hogs by 14 kN·m, for which nobody gave a
+    limit, though at the best estimate (3.9 m of 4) there is no hogging anywhere."""
+    loads = [*overhanging()["loads"], point("stack", "14 kN", at(q("3.90 m", low="3.50 m", high="5.00 m")))]
+    limits = [sheet(entry(SAG, "900 kNm"), entry(SHEAR, "900 kN"))]
+    assert outcome_of(overhanging(loads=loads, limits=limits)) != "within"
+
+
 # --- J23 -----------------------------------------------------------------------------------------------------------
 
 
@@ -310,6 +319,15 @@ def test_J23_the_place_that_clears_the_area_is_never_hidden_behind_the_place_tha
     assert outcome_of(beam(["6.00 m"], left="1.00 m", right="1.00 m", loads=loads, limits=limits)) == "clear"
 
 
+def test_J23_a_relieving_sum_is_never_taken_for_a_load_above_the_resistance() -> None:
+    """Hogging limit of 0.5 kN·m near A. 3 m from A the floor sags by 15 kN·m and 8 kN stored at the tip hogs by 12: the
+    factored hogging is 1.5 x 12 - 15 = 3 kN·m, over. As it is, the beam sags there by 3 kN·m: that clears nothing."""
+    loads = [*overhanging()["loads"], point("stack", "8 kN", "6.00 m")]
+    limits = [generous(**EN)]
+    limits[0]["entries"].append(entry(HOG, "0.5 kNm", zone=zone("0 m", "3.00 m")))
+    assert outcome_of(overhanging(loads=loads, limits=limits)) == "over"
+
+
 @pytest.mark.parametrize("record", [void(simple()), incomplete(simple()), simple(limits=[]),
                                     simple(limits=[sheet(entry(SAG, "100 kNm"), basis="not_known")])])
 def test_J23_cannot_be_judged_never_withholds_the_numbers(record: dict[str, Any]) -> None:
@@ -363,7 +381,7 @@ def test_J24_no_decision_is_ever_preselected() -> None:
 
 @pytest.mark.parametrize("place", ["ends", "midspan", "underside"])
 @pytest.mark.parametrize("build", [simple, blank, lambda: void(limited("40 kNm")), lambda: limited("40 kNm"),
-                                   lambda: simple(limits=[]), lambda: two_spans(kinds=["free", "free", "free"])])
+                                   lambda: simple(limits=[]), lambda: beam(["5 m"], kinds=["bearing", "free"])])
 def test_J25_distress_never_shows_another_outcome(build: Any, place: str) -> None:
     record = build()
     record["condition"]["distress"][place] = "something"

@@ -119,7 +119,7 @@ def test_an_app_that_imports_a_left_out_module_is_refused_at_assembly(tmp_path: 
         console.log(python.runPython(`
 import archives
 try:
-    archives.check_imports({{"pysolver/a.py": b"import json", "pysolver/b.py": b"def f():\\\\n    import sqlite3"}})
+    archives.check_imports({{"pysolver/a.py": b"import json", "pysolver/b.py": b"def f():\\\\n    import sqlite3"}}, set())
     message = "nothing found"
 except ModuleNotFoundError as error:
     message = str(error)

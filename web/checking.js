@@ -5,10 +5,10 @@
  *   onAnswer: (seq:number, stage:string, result:any) => void, onError: (seq:number, error:any) => void}} parts
  */
 export function createChecking({ ask, now, onAnswer, onError }) {
-  /** @type {{seq:number, record:any}|null} */ let wanted = null;
+  /** @type {{seq:number, record:any, again:boolean}|null} */ let wanted = null;
   let busy = false;
 
-  /** @param {{seq:number, record:any}} job @param {string} stage */
+  /** @param {{seq:number, record:any, again:boolean}} job @param {string} stage */
   async function one(job, stage) {
     const result = await ask('check', { record: job.record, now: now(), stage });
     if (wanted === job) onAnswer(job.seq, stage, result);
@@ -20,7 +20,7 @@ export function createChecking({ ask, now, onAnswer, onError }) {
     while (wanted) {
       const job = wanted;
       try {
-        await one(job, 'best');
+        if (!job.again) await one(job, 'best');
         if (wanted === job) await one(job, 'full');
       } catch (error) {
         if (wanted === job) onError(job.seq, error);
@@ -31,7 +31,9 @@ export function createChecking({ ask, now, onAnswer, onError }) {
   }
 
   return {
-    /** @param {number} seq @param {any} record */ want(seq, record) { wanted = { seq, record }; void run(); },
+    /** @param {number} seq @param {any} record */ want(seq, record) { wanted = { seq, record, again: false }; void run(); },
+    /** The same record at a later time: its result may have lapsed. @param {number} seq @param {any} record */
+    again(seq, record) { if (!wanted) { wanted = { seq, record, again: true }; void run(); } },
     forget() { wanted = null; },
   };
 }

@@ -15,6 +15,9 @@ import { createTabLock } from './tab-lock.js';
 /** @typedef {import('./state.js').Screen} Screen */
 /** @typedef {import('./types.js').Field} Field */
 
+/** A result lapses with time, so it is asked for again now and then. */
+const LOOK_AGAIN_MS = 240_000;
+
 export function startController() {
   const state = createState();
   /** @type {any} */ let storage = null;
@@ -26,6 +29,7 @@ export function startController() {
     onAnswer: (seq, stage, result) => { state.answer.value = { seq, stage, result }; },
     onError: (seq, error) => { state.answer.value = { seq, stage: 'error', result: refused(error) }; } });
   const check = () => { const entry = state.entry.value; if (entry && state.solver.value.state === 'ready') checking.want(entry.seq, entry.record); };
+  const checkAgain = () => { const entry = state.entry.value; if (entry && state.current.value && document.visibilityState === 'visible') checking.again(entry.seq, entry.record); };
   const editing = createEditing({ state, storage: () => storage, ask, check, fail });
   const library = createLibrary({ state, storage: () => storage, ask, savePreferences });
   const sharing = createSharing({ state, ask, library });
@@ -40,6 +44,7 @@ export function startController() {
   /** @param {Screen} screen */
   function applyScreen(screen) {
     state.padUp.value = false; state.meansFor.value = null; state.focus.value = null;
+    /** @type {HTMLElement|null} */ (document.activeElement)?.blur(); // stores what is being written
     if (screen.name === 'list') { closeCheck(); void library.refresh().catch(fail); }
     state.screen.value = screen;
     if ((screen.name === 'check' || screen.name === 'share') && screen.id && state.entry.value?.id !== screen.id) void openCheck(screen.id).catch(fail);
@@ -153,11 +158,16 @@ export function startController() {
   }
 
   async function begin() {
-    storage = await openStorage();
+    storage = await openStorage().catch((error) => { throw new Error(`This browser does not let the page store anything (a private window may be why): ${messageOf(error)}.`); });
     state.preferences.value = { ...DEFAULTS, ...await storage.kept('preferences') };
     const hello = await storage.kept('hello');
     if (hello && state.solver.value.state !== 'ready') state.words.value = hello;
-    window.addEventListener('popstate', (event) => applyScreen(event.state?.screen ?? firstScreen()));
+    document.addEventListener('visibilitychange', checkAgain);
+    setInterval(checkAgain, LOOK_AGAIN_MS);
+    window.addEventListener('popstate', (event) => {
+      if (state.clearing.value) { history.pushState({ screen: state.screen.value }, ''); return; } // that page is left by a name, not by Back
+      applyScreen(event.state?.screen ?? firstScreen());
+    });
     window.addEventListener('hashchange', () => { if (sharing.fragment()) applyScreen({ name: 'opened' }); });
     await library.refresh();
     const first = history.state?.screen ?? firstScreen();
@@ -172,6 +182,8 @@ export function startController() {
 
   async function create() { const id = await library.create(); show({ name: 'check', id, at: '/place' }); void persist(); }
 
+  window.addEventListener('error', (event) => { fail(event.error ?? event.message); });
+  window.addEventListener('unhandledrejection', (event) => { fail(event.reason); });
   state.missing.value = missingFeatures();
   void begin().catch(fail);
   start();

@@ -8,14 +8,15 @@ export function differs(draft, entered) {
   if (!draft) return false;
   if (draft.text.trim() === '') return Boolean(entered);
   if (!entered) return true;
-  return ['text', 'unit', 'means', 'low', 'high'].some((key) => (/** @type {any} */ (draft)[key] ?? '') !== (/** @type {any} */ (entered)[key] ?? ''));
+  if (draft.unit !== (entered.unit || draft.unit)) return true; // a text may bring its unit and leave the field's own out
+  return ['text', 'means', 'low', 'high'].some((key) => (/** @type {any} */ (draft)[key] ?? '') !== (/** @type {any} */ (entered)[key] ?? ''));
 }
 
 /** What the field starts from when a key is pressed. @param {Quantity|null|undefined} entered @param {string} unit @returns {Draft} */
 export function draftOf(entered, unit) {
   if (!entered) return { text: '', unit };
   const { value, ...written } = entered;
-  return written;
+  return { ...written, unit: entered.unit || unit };
 }
 
 /** @param {Draft} draft @returns {Quantity|null} what Next enters; null when the field was emptied */

@@ -25,11 +25,14 @@ export function createEditing({ state, storage, ask, check, fail }) {
     return queue;
   }
 
-  /** @param {(record:any) => any} change @param {string} label @param {{keepDecision?:boolean, undoing?:boolean}} [how] */
+  /** @param {(record:any) => any} change @param {string} label @param {{keepDecision?:boolean, undoing?:boolean, merge?:boolean}} [how] `merge`: one undo for a run of letters */
   function commit(change, label, how = {}) {
+    const id = state.entry.value?.id;
+    if (!id || state.readOnly.value) return Promise.resolve();
     return inTurn(async () => {
-      const entry = state.entry.value;
-      if (!entry || state.readOnly.value) return;
+      // The check may have been closed since; what was answered in it is stored all the same.
+      const entry = state.entry.value?.id === id ? state.entry.value : await storage().check(id);
+      if (!entry) return;
       const before = entry.record;
       let after = change(before);
       if (after === before) return;
@@ -37,7 +40,8 @@ export function createEditing({ state, storage, ask, check, fail }) {
       const stored = await write({ ...entry, record: { ...after, changed: isoWithZone(new Date()) } });
       if (!stored || state.entry.value?.id !== stored.id) return;
       state.entry.value = stored;
-      if (!how.undoing) state.undo.value = [...state.undo.value, { record: before, label }].slice(-MAX_UNDO);
+      const last = state.undo.value[state.undo.value.length - 1];
+      if (!how.undoing && !(how.merge && last?.label === label)) state.undo.value = [...state.undo.value, { record: before, label }].slice(-MAX_UNDO);
       if (before.decision && !after.decision && !how.undoing) state.notice.value = { text: 'The decision was made for the earlier values: decide again at the result.' };
       check();
     });
@@ -134,7 +138,7 @@ export function createEditing({ state, storage, ask, check, fail }) {
       if (getAt(record, field.path) === value) return record;
       const next = setAt(prepared(record, field.path), field.path, value);
       return look ? afterLook(next, value, isoWithZone(new Date())) : next;
-    }, field.name);
+    }, field.name, { merge: field.kind === 'text' || field.kind === 'long' });
   }
 
   /** @param {Field} field @param {string} id @param {boolean} on */

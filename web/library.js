@@ -35,7 +35,7 @@ export function createLibrary({ state, storage, ask, savePreferences }) {
 
   async function demo() {
     const { record } = await ask('demo', {});
-    return keep(asNew(record), 'demonstration, invented');
+    return keep({ ...asNew(record), found_at: record.found_at ?? now() }, 'demonstration, invented');
   }
 
   /** @param {string} id @param {boolean} gone */

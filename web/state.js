@@ -19,6 +19,8 @@ export function createState() {
   const answer = signal(/** @type {{seq:number, stage:string, result:any}|null} */ (null));
   const screen = signal(/** @type {Screen} */ ({ name: 'list' }));
   const record = computed(() => entry.value?.record ?? null);
+  const current = computed(() => (answer.value && entry.value && answer.value.seq === entry.value.seq ? answer.value.result : null));
+  const readOnly = signal('');
   const walk = computed(() => (record.value ? stations(record.value, words.value) : []));
   return {
     words, entry, drafts, answer, screen, record, walk,
@@ -35,10 +37,12 @@ export function createState() {
     missing: signal(/** @type {string[]} */ ([])),
     /** one sentence at the foot of the page */ notice: signal(/** @type {{text:string, undo?:()=>void, undoLabel?:string}|null} */ (null)),
     undo: signal(/** @type {{record:any, label:string}[]} */ ([])),
-    readOnly: signal(''), persisted: signal(/** @type {boolean|null} */ (null)),
+    readOnly, persisted: signal(/** @type {boolean|null} */ (null)),
     opened: signal(/** @type {any} */ (null)), shared: signal(/** @type {any} */ (null)), failure: signal(''),
     typing: computed(() => Object.keys(drafts.value).filter((path) => differs(drafts.value[path], getAt(record.value, path)))),
-    /** the result that stands for the record as it is now */ current: computed(() => (answer.value && entry.value && answer.value.seq === entry.value.seq ? answer.value.result : null)),
+    /** the result that stands for the record as it is now */ current,
+    /** people must go away from the beam, and nobody was told yet */
+    clearing: computed(() => screen.value.name === 'check' && Boolean(current.value?.clear_area) && !record.value?.condition.told && !readOnly.value),
   };
 }
 /** @typedef {ReturnType<typeof createState>} State */

@@ -9,6 +9,9 @@ import { isUnder } from './pointer.js';
 
 export const RESULT = '/result';
 
+/** Facts without a field of their own: answering the look dates the finding. @type {Record<string, string>} */
+const ANSWERED_AT = { '/found_at': '/condition', '/valid_until': '/condition' };
+
 /** @param {any} record @param {import('./types.js').Hello} words @returns {Station[]} */
 export function stations(record, words) {
   const vocabulary = words.vocabulary;
@@ -19,8 +22,9 @@ export function stations(record, words) {
   ];
 }
 
-/** Where a path of an error, a pick or a missing fact is answered. @param {Station[]} all @param {string} path @returns {Station} */
-export function stationOf(all, path) {
+/** Where a path of an error, a pick or a missing fact is answered. @param {Station[]} all @param {string} asked @returns {Station} */
+export function stationOf(all, asked) {
+  const path = ANSWERED_AT[asked] ?? asked;
   const exact = all.find((one) => one.path === path) ?? all.find((one) => one.fields.some((field) => field.path === path));
   if (exact) return exact;
   const inside = all.find((one) => one.path !== '/loads' && one.path !== '/limits' && isUnder(path, one.path))

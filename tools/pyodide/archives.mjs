@@ -51,7 +51,7 @@ async function application(pyodideFolder, outFolder, bootstrap, wheels) {
   const archives = python.pyimport('archives');
   const examples = archives.use_everything();
   const libraries = archives.numpy_archive('/numpy.zip').toJs();
-  const packages = archives.app_archive('/app.zip', archives.pure_distributions()).toJs({ dict_converter: Object.fromEntries });
+  const packages = archives.app_archive('/app.zip', archives.pure_distributions(), '/numpy.zip').toJs({ dict_converter: Object.fromEntries });
   for (const name of ['numpy', 'app']) fs.writeFileSync(path.join(outFolder, `${name}.zip`), python.FS.readFile(`/${name}.zip`));
   for (const library of libraries) {
     fs.writeFileSync(path.join(outFolder, libraryFile(library)), python.FS.readFile(`${SITE}/${library}`));

@@ -148,27 +148,32 @@ def numpy_archive(out: str) -> list[str]:
     return sorted(name for name in used if name.endswith(".so"))
 
 
-def check_imports(members: dict[str, bytes]) -> None:
-    """Every module of the standard library that the app's sources import is among those that ship.
+def check_imports(members: dict[str, bytes], numpy_members: set[str]) -> None:
+    """Every module of the standard library and of numpy that the app's sources import, at once or later, ships.
 
     Raises:
         ModuleNotFoundError: one is left out; names the file and the module.
     """
     for file, source in members.items():
-        if file.endswith(".py"):
-            for name in imported_names(source, file.removesuffix(".py").replace("/", ".")):
-                if name.split(".")[0] in sys.stdlib_module_names and LEFT_OUT.match(name.replace(".", "/") + "."):
-                    raise ModuleNotFoundError(f"{file} imports {name}, which LEFT_OUT in tools/pyodide/archives.py leaves out")
+        if not file.endswith(".py"):
+            continue
+        for name in imported_names(source, file.removesuffix(".py").replace("/", ".")):
+            if name.split(".")[0] in sys.stdlib_module_names and LEFT_OUT.match(name.replace(".", "/") + "."):
+                raise ModuleNotFoundError(f"{file} imports {name}, which LEFT_OUT in tools/pyodide/archives.py leaves out")
+            numpy_file = module_file(name) if name.split(".")[0] == "numpy" else None
+            if numpy_file and numpy_file + "c" not in numpy_members:
+                raise ModuleNotFoundError(f"{file} imports {name} late, so that it is not seen in use: import it at the top")
 
 
-def app_archive(out: str, distributions: list[str]) -> dict[str, int]:
+def app_archive(out: str, distributions: list[str], numpy_out: str) -> dict[str, int]:
     """Write pysolver and its dependencies as .pyc, with docstrings and data files; returns bytes by package."""
     sources: dict[str, bytes] = {}
     for file in (file for name in distributions for file in importlib.metadata.files(name) or []):
         name = file.as_posix()
         if not NOT_SHIPPED.search(name):
             sources[name] = Path(str(file.locate())).read_bytes()
-    check_imports(sources)
+    with zipfile.ZipFile(numpy_out) as archive:
+        check_imports(sources, set(archive.namelist()))
     members = {
         (name + "c" if name.endswith(".py") else name): (
             compiled(content, f"{SITE}/{name}", True) if name.endswith(".py") else content

@@ -1,5 +1,5 @@
 // Do the solver's tests hold in the very set that ships? Starts the site's archives; only for pytest's sake the full standard library
-// takes the place of the shipped one, and numpy.testing and numpy.random, which pytest and hypothesis want, are added from the wheel.
+// takes the place of the shipped one, and the parts of numpy that only tests want are added from the wheel.
 //
 //   node run_pytest.mjs SITE TESTS_FOLDER WHEEL...   (the wheel of numpy is among them)
 import fs from 'node:fs';

@@ -10,16 +10,18 @@ WHEELS = Path("/wheels")
 SITE = Path("/pytest-site")
 NUMPY_AIDS = Path("/numpy-aids")
 HOME = Path("/home/pyodide")
+# Parts of numpy that tests and hypothesis use and pysolver doesn't.
+TEST_AIDS = ("numpy/testing/", "numpy/random/", "numpy/polynomial/")
 # A whole file that needs more than Pyodide has says so at module level; it can't even be imported there.
 NOT_HERE = re.compile(r"^pytestmark\b.*\bcpython_only\b", re.M)
 
 
 def unpack() -> None:
-    """Put pytest and its kin on the path, and the two parts of numpy that only tests use beside the shipped ones."""
+    """Put pytest and its kin on the path, and the parts of numpy that only tests use beside the shipped ones."""
     for wheel in WHEELS.glob("*.whl"):
         with zipfile.ZipFile(wheel) as archive:
             if wheel.name.startswith("numpy-"):
-                aids = [name for name in archive.namelist() if name.startswith(("numpy/testing/", "numpy/random/"))]
+                aids = [name for name in archive.namelist() if name.startswith(TEST_AIDS)]
                 archive.extractall(NUMPY_AIDS, aids)
             else:
                 archive.extractall(SITE)

@@ -51,3 +51,13 @@ test('after an error the next record is asked all the same', async () => {
   asked[1]?.resolve('fine'); await settle();
   assert.deepEqual(seen, ['1 error broke', '2 best fine']);
 });
+
+test('looking again at a later time asks only for the whole, and never pushes in front of a newer record', async () => {
+  const { seen, checking, asked } = started();
+  checking.again(4, 'r4');
+  asked[0]?.resolve('lapsed'); await settle();
+  assert.deepEqual(seen, ['4 full lapsed']);
+  checking.want(5, 'r5'); checking.again(4, 'r4');
+  asked[1]?.resolve('a'); await settle();
+  assert.equal(asked[2]?.payload.record, 'r5');
+});

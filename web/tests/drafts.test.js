@@ -12,6 +12,12 @@ test('a half typed number differs from the entered one, its own text does not', 
   assert.equal(differs(undefined, entered), false);
 });
 
+test('a number that brought its own unit takes the unit printed in the field when it is typed anew', () => {
+  const entered = { text: '5.40 m', unit: '' };
+  assert.equal(draftOf(entered, 'm').unit, 'm');
+  assert.equal(differs(draftOf(entered, 'm'), entered), false);
+});
+
 test('a changed unit or way of knowing counts as typing', () => {
   const entered = { text: '12', unit: 'kN', means: 'tape' };
   assert.equal(differs({ text: '12', unit: 't', means: 'tape' }, entered), true);

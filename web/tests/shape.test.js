@@ -41,7 +41,7 @@ test('every field is found again by its path, as are paths below and above it', 
     assert.equal(stationOf(all, `${field.path}/text`).path, one.path, field.path);
   }
   for (const [path, title] of [['/supports/1', 'Support B'], ['/spans/0/length', 'Span A–B'], ['/self_weight', 'Member'], ['/restraint/answer', 'Member'], ['/limits', 'Limits 1'],
-    ['/condition/distress/ends', 'Look'], ['/loads/0/position/distance', 'Load 1'], ['/hinges/0/position', 'Hinges'], ['/ends/left', 'Where']]) assert.equal(stationOf(all, path ?? '').title, title);
+    ['/condition/distress/ends', 'Look'], ['/loads/0/position/distance', 'Load 1'], ['/hinges/0/position', 'Hinges'], ['/ends/left', 'Where'], ['/found_at', 'Look']]) assert.equal(stationOf(all, path ?? '').title, title);
 });
 
 test('Next never leads to a button, a note, or what stands under More', () => {

@@ -1,6 +1,6 @@
 // Which screen stands on the page, and what lies over it?
 import { render } from '../vendor/preact.js';
-import { useEffect } from '../vendor/preact-hooks.js';
+import { useEffect, useErrorBoundary } from '../vendor/preact-hooks.js';
 import '../vendor/signals.js';
 import { About } from './about.js';
 import { CheckScreen } from './check.js';
@@ -27,9 +27,13 @@ export function mountApp(root, controller) {
 function App({ controller }) {
   const { screen, preferences, current } = controller.state;
   const { light, large } = preferences.value;
+  const [broken, mend] = useErrorBoundary((/** @type {unknown} */ error) => console.error(error));
   useEffect(() => { document.documentElement.className = [`light-${light}`, large ? 'large-type' : ''].join(' ').trim(); }, [light, large]);
-  const clear = screen.value.name === 'check' && current.value?.clear_area && !controller.state.record.value?.condition.told;
-  if (clear) return html`<${ClearArea} controller=${controller} lines=${current.value.clear_area.lines} />`;
+  if (broken) {
+    return html`<main class="page"><h1>This screen broke</h1><p role="alert">${String(broken)}. That is our fault, not yours. Everything entered is stored.</p>
+      <button class="key key-main" onClick=${() => { controller.back(); mend(); }}>Back to the list</button></main>`;
+  }
+  if (controller.state.clearing.value) return html`<${ClearArea} controller=${controller} lines=${current.value.clear_area.lines} />`;
   const Screen = SCREENS[screen.value.name] ?? ListScreen;
   return html`<${Screen} controller=${controller} /><${Notices} controller=${controller} />`;
 }

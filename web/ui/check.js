@@ -54,7 +54,7 @@ function WideCheck({ controller, station, pad }) {
     <div class="columns">
       <div class="column column-fields"><${AllFields} controller=${controller} station=${station} />${pad && html`<${PadPanel} key=${pad.path} controller=${controller} field=${pad} />`}</div>
       <main class="column column-drawings"><${WorkingDrawing} controller=${controller} station=${station} />
-        <section class="station" id="result" aria-label="Result"><h2 tabindex="-1">Result</h2><${ResultView} controller=${controller} /></section></main>
+        <section class="station" id="result" aria-label="Result"><${ResultView} controller=${controller} /></section></main>
     </div>
     <${OutcomeBar} controller=${controller} />
   </div>`;
@@ -114,7 +114,7 @@ function Walk({ controller, station }) {
 /** @param {{controller: Controller, station: Station}} props */
 function OneStation({ controller, station }) {
   const after = controller.state.walk.value[controller.state.walk.value.indexOf(station) + 1];
-  return html`<main class="station one-station" aria-label=${station.title}><${SolverStanding} controller=${controller} />
+  return html`<main class="station one-station" aria-label=${station.title}>${station.path !== '/result' && html`<h2 class="unseen">${station.title}</h2>`}<${SolverStanding} controller=${controller} />
     ${station.path === '/result' ? html`<${ResultView} controller=${controller} />`
       : html`<${StationFields} controller=${controller} station=${station} />`}
     ${after && html`<button class="key key-on" aria-label=${`On to ${after.title}`} onClick=${() => controller.walk(1)}>On to ${after.title} ›</button>`}</main>`;
@@ -132,7 +132,7 @@ function AllFields({ controller, station, withResult }) {
   return html`<div class="all-fields" role=${withResult ? 'main' : 'form'} aria-label="All fields" ref=${own}><${SolverStanding} controller=${controller} />
     ${controller.state.walk.value.filter((one) => one.path !== '/result').map((one) => html`<section class="station" key=${one.path} id=${sectionId(one.path)} aria-label=${one.title}>
       <h2>${one.title}</h2><${StationFields} controller=${controller} station=${one} /></section>`)}
-    ${withResult && html`<section class="station" id="result" aria-label="Result"><h2>Result</h2><${ResultView} controller=${controller} /></section>`}
+    ${withResult && html`<section class="station" id="result" aria-label="Result"><${ResultView} controller=${controller} /></section>`}
   </div>`;
 }
 

@@ -5,7 +5,7 @@ import { html } from './html.js';
 
 /** @param {{controller: import('../controller.js').Controller, lines: string[]}} props */
 export function ClearArea({ controller, lines }) {
-  const { record, preferences, readOnly } = controller.state;
+  const { record, preferences } = controller.state;
   const [name, setName] = useState('');
   const [said, setSaid] = useState('');
   const head = useRef(/** @type {HTMLHeadingElement|null} */ (null));
@@ -19,6 +19,6 @@ export function ClearArea({ controller, lines }) {
     <form class="clear-told" onSubmit=${(/** @type {Event} */ event) => { event.preventDefault(); leave(); }}>
       <label for="told">Name of who was told</label><input id="told" type="text" maxlength="120" autocomplete="off" value=${name} onInput=${(/** @type {any} */ event) => setName(event.currentTarget.value)} />
       <p role="alert">${said}</p>
-      ${readOnly.value ? html`<p>${readOnly.value}</p><button type="button" class="key" onClick=${controller.back}>Back to the list</button>` : html`<button class="key" type="submit">They were told: leave this page</button>`}
+      <button class="key" type="submit">They were told: leave this page</button>
     </form></main>`;
 }

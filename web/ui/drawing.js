@@ -32,9 +32,9 @@ export function Drawing({ svg, label, picks = [], selected, onPick, strip, natur
     host.parentElement?.style.setProperty('--drawn-width', width > room * MOST_SHRINK ? `${width}px` : '100%');
     host.parentElement?.style.setProperty('--drawn-shape', `${width} / ${height}`);
   }, [svg, label]);
-  useEffect(() => { const el = frame.current; setLong(Boolean(el && el.scrollWidth > el.clientWidth + 2)); }, [svg, strip]);
+  useEffect(() => { const el = frame.current; setLong(Boolean(el && el.scrollWidth > el.clientWidth + 2)); }, [svg, strip, box]);
   const chosen = picks.find((pick) => pick.path === selected);
-  useEffect(() => { bringIntoView(frame.current, sheet.current, chosen); }, [selected, box, svg, strip]);
+  useEffect(() => { bringIntoView(frame.current, sheet.current, chosen); }, [selected, box, svg, strip, long]);
 
   const touch = (/** @type {MouseEvent} */ event) => {
     const drawn = sheet.current?.querySelector('svg');
@@ -46,12 +46,12 @@ export function Drawing({ svg, label, picks = [], selected, onPick, strip, natur
     if (only && near.length === 1) { setSeveral([]); onPick(only.path); } else setSeveral(near);
   };
   const page = (/** @type {number} */ way) => frame.current?.scrollBy({ left: way * frame.current.clientWidth * 0.8 });
-  return html`<div class=${['drawing', strip ? 'drawing-strip' : '', natural ? 'drawing-natural' : ''].join(' ').trim()}>
+  return html`<div class=${['drawing', strip ? 'drawing-strip' : '', natural ? 'drawing-natural' : '', long && !strip ? 'drawing-long' : ''].join(' ').trim()}>
     <div class="drawing-frame" ref=${frame} onClick=${touch}>
       <div class="drawing-layers"><div ref=${sheet} class="drawing-sheet"></div>
         ${chosen && html`<svg class="drawing-mark" viewBox=${box} aria-hidden="true"><circle cx=${chosen.x} cy=${chosen.y} r="17" /></svg>`}</div>
     </div>
-    ${long && !strip && html`<div class="page-keys"><button class="key" aria-label=${`${label}: page left`} onClick=${() => page(-1)}>‹</button><button class="key" aria-label=${`${label}: page right`} onClick=${() => page(1)}>›</button></div>`}
+    ${long && !strip && html`<button class="key page-key page-left" aria-label=${`${label}: page left`} onClick=${() => page(-1)}>‹</button><button class="key page-key page-right" aria-label=${`${label}: page right`} onClick=${() => page(1)}>›</button>`}
     ${several.length > 1 && html`<div class="several" role="group" aria-label="Which one is meant"><p>Which one?</p>
       ${several.map((pick) => html`<button class="key" key=${pick.path} onClick=${() => { setSeveral([]); onPick?.(pick.path); }}>${pick.label}</button>`)}
       <button class="key" onClick=${() => setSeveral([])}>None of these</button></div>`}

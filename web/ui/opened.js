@@ -24,7 +24,8 @@ export function OpenedScreen({ controller }) {
 function Read({ controller, opened }) {
   const { record, result, agreement } = opened;
   const keep = () => { void controller.sharing.keepOpened().then((/** @type {string} */ id) => controller.show({ name: 'check', id, at: '/place' })).catch(controller.fail); };
-  return html`<p class="standing">To read only. Found by ${record.found_by.name || 'someone not named'}${record.found_at ? `, ${record.found_at.slice(0, 16).replace('T', ' ')}` : ''}. ${record.photos.length ? `${record.photos.length} photo${record.photos.length === 1 ? '' : 's'} stayed on the sender’s phone.` : ''}</p>
+  return html`${result.clear_area && html`<div class="refusal" role="alert">${result.clear_area.lines.map((/** @type {string} */ line, /** @type {number} */ i) => (i ? html`<p>${line}</p>` : html`<h2>${line}</h2>`))}</div>`}
+    <p class="standing">To read only. Found by ${record.found_by.name || 'someone not named'}${record.found_at ? `, ${record.found_at.slice(0, 16).replace('T', ' ')}` : ''}. ${record.photos.length ? `${record.photos.length} photo${record.photos.length === 1 ? '' : 's'} stayed on the sender’s phone.` : ''}</p>
     <section class=${agreement.equal ? 'agreement' : 'agreement agreement-differs'} aria-label="Agreement"><h2>${agreement.equal ? 'Worked out again: the numbers are equal' : 'Worked out again: the numbers differ'}</h2><p>${agreement.shown}</p>
       ${agreement.differs?.length > 0 && html`<table class="ruled"><thead><tr><th scope="col">Number</th><th scope="col">In the link</th><th scope="col">Here</th></tr></thead><tbody>${agreement.differs.map((/** @type {any} */ one) => html`<tr><th scope="row">${one.name}</th><td>${one.recorded}</td><td>${one.now}</td></tr>`)}</tbody></table>`}</section>
     <${Verdict} result=${result} /><${CriteriaTable} result=${result} /><${ReactionsTable} result=${result} /><${ResultDrawings} controller=${controller} result=${result} />
@@ -38,7 +39,7 @@ export function InWords({ record, result, words }) {
   return html`${stations(record, words).map((station) => {
     const rows = station.fields.map((field) => ({ field, words: inWords(field, getAt(record, field.path), result) })).filter((row) => row.words);
     return rows.length ? html`<section class="in-words" key=${station.path} aria-label=${station.title}><h3>${station.title}</h3><dl>${rows.map(({ field, words: said }) => html`<div><dt>${field.label}</dt><dd>${said}</dd></div>`)}</dl></section>` : null;
-  })}${record.decision && html`<p>Decision: ${record.decision.choice}, ${record.decision.name}, ${record.decision.time}</p>`}`;
+  })}${record.decision && html`<p>Decision: ${words.vocabulary.decisions.find((one) => one.id === record.decision.choice)?.label ?? record.decision.choice}, ${record.decision.name}, ${record.decision.time}</p>`}`;
 }
 
 /** @param {import('../types.js').Field} field @param {any} value @param {any} result @returns {string} */

@@ -8,7 +8,7 @@ const STATES = { within: 'within', close: 'close', over: 'over', not_judged: 'no
 export function CriteriaTable({ result }) {
   const rows = result.criteria ?? [];
   if (!rows.length) return html`<p class="quiet">Nothing to compare yet.</p>`;
-  return html`<section aria-label="Governing"><h3>Compared, place by place</h3><ul class="criteria">${rows.map((/** @type {any} */ row) => html`<li class=${`criterion is-${row.state}`}>
+  return html`<section aria-label="Governing"><h2>Compared, place by place</h2><ul class="criteria">${rows.map((/** @type {any} */ row) => html`<li class=${`criterion is-${row.state}`}>
     <p class="criterion-head"><b>${row.title}</b><span class="criterion-state">${STATES[row.state] ?? row.state}</span></p>
     <dl>${pair('Where', row.place)}${pair('Unfactored', row.unfactored)}${pair('Factored', row.factored)}${pair('Worst case', row.high)}${pair('Limit', row.limit)}${pair('Ratio', row.ratio)}${pair('Ratio, worst case', row.ratio_high)}${pair('Combination', row.combination)}${pair('Document', row.document)}</dl>
     ${row.note && html`<p class="quiet">${row.note}</p>`}</li>`)}</ul></section>`;
@@ -21,7 +21,7 @@ const pair = (name, value) => (value === null || value === undefined || value ==
 export function ReactionsTable({ result }) {
   const rows = result.reactions ?? [];
   if (!rows.length) return null;
-  return html`<section aria-label="Reactions"><h3>Reactions, positive up, unfactored</h3><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best</th><th scope="col">Low</th><th scope="col">High</th></tr></thead>
+  return html`<section aria-label="Reactions"><h2>Reactions, positive up, unfactored</h2><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best</th><th scope="col">Low</th><th scope="col">High</th></tr></thead>
     <tbody>${rows.map((/** @type {any} */ row) => html`<tr><th scope="row">${row.support}</th><td>${row.unfactored}</td><td>${row.low}</td><td>${row.high}</td></tr>${(row.unit_note || row.fixing) && html`<tr><td colspan="4" class="quiet">${[row.unit_note, row.fixing].filter(Boolean).join('; ')}</td></tr>`}`)}</tbody></table></section>`;
 }
 
@@ -33,4 +33,4 @@ export function Lists({ result }) {
 }
 
 /** @param {string} title @param {string[]|undefined} items */
-const list = (title, items) => (items?.length ? html`<section aria-label=${title}><h3>${title}</h3><ul class="plain">${items.map((item) => html`<li>${item}</li>`)}</ul></section>` : null);
+const list = (title, items) => (items?.length ? html`<section aria-label=${title}><h2>${title}</h2><ul class="plain">${items.map((item) => html`<li>${item}</li>`)}</ul></section>` : null);

@@ -31,20 +31,29 @@ export function ResultView({ controller }) {
 /** @param {{result: any, onGo?: (path:string)=>void}} props */
 export function Verdict({ result, onGo }) {
   const { outcome } = result;
+  const [first, ...others] = outcome.missing ?? [];
+  const named = new Set((outcome.missing ?? []).map((/** @type {any} */ fact) => fact.text));
+  const reasons = (outcome.reasons ?? []).filter((/** @type {string} */ reason) => !named.has(reason));
   return html`<section class=${`verdict is-${outcome.word}`} aria-label="Outcome in full"><div class="verdict-mark"><${OutcomeShape} word=${outcome.word} /></div>
-    <div class="verdict-words"><h3>${outcome.title}</h3>${outcome.as_found && html`<p>${outcome.as_found}</p>`}
+    <div class="verdict-words"><h2>${outcome.title}</h2>${outcome.as_found && html`<p>${outcome.as_found}</p>`}
       ${outcome.lapsed && html`<p><b>as found earlier, look again</b></p>`}
       ${outcome.rules_out && html`<p>Rules out: <b>${outcome.rules_out}</b></p>`}${outcome.until && html`<p>Holds until ${outcome.until} or any change.</p>`}</div>
-    ${outcome.reasons?.length > 0 && html`<ul class="reasons">${outcome.reasons.map((/** @type {string} */ reason) => html`<li>${reason}</li>`)}</ul>`}
-    ${outcome.missing?.map((/** @type {any} */ fact) => html`<div class="missing"><p>Missing: <b>${fact.text}</b>${fact.who ? html`<br />Who can give it: ${fact.who}` : ''}</p>
-      ${onGo && fact.path && html`<button class="key key-main" aria-label=${`Answer: ${fact.text}`} onClick=${() => onGo(fact.path)}>Answer it ›</button>`}</div>`)}
+    ${reasons.length > 0 && html`<ul class="reasons">${reasons.map((/** @type {string} */ reason) => html`<li>${reason}</li>`)}</ul>`}
+    ${first && html`<${Missing} fact=${first} onGo=${onGo} main />`}
+    ${others.length > 0 && html`<details class="missing"><summary>${others.length} more ${others.length === 1 ? 'fact is' : 'facts are'} missing</summary>${others.map((/** @type {any} */ fact) => html`<${Missing} fact=${fact} onGo=${onGo} />`)}</details>`}
   </section>`;
+}
+
+/** A fact that is missing, and the way to it. @param {{fact: any, onGo?: (path:string)=>void, main?: boolean}} props */
+function Missing({ fact, onGo, main }) {
+  return html`<div class="missing"><p>Missing: <b>${fact.text}</b>${fact.who ? html`<br />Who can give it: ${fact.who}` : ''}</p>
+    ${onGo && fact.path && html`<button class=${main ? 'key key-main' : 'key'} aria-label=${`Answer: ${fact.text}`} onClick=${() => onGo(fact.path)}>Answer it ›</button>`}</div>`;
 }
 
 /** @param {{controller: Controller, result: any}} props */
 function Problems({ controller, result }) {
   if (!result.errors?.length) return null;
-  return html`<section class="problems" aria-label="What could not be read"><h3>Could not be read</h3><ul>${result.errors.map((/** @type {any} */ one) => html`<li>${one.message}
+  return html`<section class="problems" aria-label="What could not be read"><h2>Could not be read</h2><ul>${result.errors.map((/** @type {any} */ one) => html`<li>${one.message}
     <button class="key" aria-label=${`Go to: ${one.message}`} onClick=${() => controller.go(one.field)}>Go there</button></li>`)}</ul></section>`;
 }
 
@@ -62,7 +71,7 @@ function Decision({ controller, result }) {
     setSaid('');
     void controller.editing.decide(choice, name.trim());
   };
-  return html`<section class="decision" aria-label="Decision"><h3>Decision, yours and not the tool’s</h3>
+  return html`<section class="decision" aria-label="Decision"><h2>Decision, yours and not the tool’s</h2>
     ${made && html`<p class="made">Decided: <b>${result.decisions?.find((/** @type {any} */ one) => one.id === made.choice)?.label ?? made.choice}</b>, ${made.name}, ${made.time.slice(0, 16).replace('T', ' ')}</p>`}
     <fieldset class="choices" aria-label="Decision"><legend>What is left to pick</legend><div class="choice-list">${(result.decisions ?? []).map((/** @type {any} */ one) => one.ruled_out
       ? html`<p key=${one.id} class="choice is-struck"><span class="choice-mark" aria-hidden="true"></span><span class="choice-words"><del>${one.label}</del><small>${one.why}</small></span></p>`

@@ -9,6 +9,9 @@ import { PhotoField } from './photo.js';
 /** @typedef {import('../controller.js').Controller} Controller */
 /** @typedef {import('../types.js').Field} Field */
 
+/** Words are stored in a run of letters, so that not every letter starts a check. */
+const STORE_AFTER_MS = 150;
+
 /** @param {{controller: Controller, station: import('../types.js').Station}} props */
 export function StationFields({ controller, station }) {
   const shown = station.fields.filter((field) => !field.extra);
@@ -73,7 +76,7 @@ function TextField({ controller, field, value, locked }) {
   const timer = useRef(0);
   const pending = useRef(/** @type {string|null} */ (null));
   const store = () => { clearTimeout(timer.current); if (pending.current !== null) { const text = pending.current; pending.current = null; void editing.answer(field, text); } };
-  const change = (/** @type {any} */ event) => { pending.current = event.currentTarget.value; clearTimeout(timer.current); timer.current = window.setTimeout(store, 250); };
+  const change = (/** @type {any} */ event) => { pending.current = event.currentTarget.value; clearTimeout(timer.current); timer.current = window.setTimeout(store, STORE_AFTER_MS); };
   const key = (/** @type {KeyboardEvent} */ event) => { if (event.key === 'Enter' && field.kind === 'text') { event.preventDefault(); store(); void controller.next(field); } };
   useEffect(() => store, []);
   const shown = pending.current ?? value;
@@ -89,6 +92,6 @@ function useFocus(wanted, own, selector) {
     if (!wanted || own.current?.contains(document.activeElement)) return;
     const target = /** @type {HTMLElement|null} */ (own.current?.querySelector(`${selector.split(',')[0]}:checked`) ?? own.current?.querySelector(selector) ?? null);
     target?.focus({ preventScroll: true });
-    own.current?.scrollIntoView({ block: 'center' });
+    own.current?.scrollIntoView({ block: 'start' });
   }, [wanted]);
 }
