@@ -29,7 +29,7 @@ def test_a_broken_link_is_refused_with_words(phone: Device, kind: str) -> None:
     fragment, words = BROKEN[kind]
     page = solver_ready(phone.open("#" + fragment))
     alert = page.get_by_role("alert")
-    expect(alert).to_contain_text("The link could not be read.", timeout=START)
+    expect(alert).to_contain_text("The link could not be read.", timeout=15_000)
     expect(alert).to_contain_text(words)
     expect(page.get_by_role("button", name="Keep a copy as a new check")).to_have_count(0)
 

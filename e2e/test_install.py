@@ -61,7 +61,7 @@ def test_a_file_that_arrives_changed_keeps_it_from_saying_ready(dist: Path, serv
     phone = device(server.url, allow=("service worker", "ServiceWorker", "did not arrive as it was published"))
     page = solver_ready(phone.open())
     offline = page.locator(".offline")
-    expect(offline).to_contain_text("storing failed", timeout=START)
+    expect(offline).to_contain_text("storing failed", timeout=30_000)
     expect(offline).to_contain_text("print.css did not arrive as it was published")
     expect(page.get_by_text("Ready without signal.")).to_have_count(0)
     person = demonstration(page)

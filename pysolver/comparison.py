@@ -125,7 +125,9 @@ def capacities(along: Along, one: Judged) -> Floats:
 def without_limit(along: Along, kind: str, all_judged: Sequence[Judged], low: Floats, high: Floats) -> Worst:
     """The largest effect (its ratio is to one N or N·m) of a kind on those pieces for which no sheet has a limit."""
     limits = [capacities(along, replace(one, at_face=False)) for one in all_judged if one.criterion.kind == kind]
-    covered = np.isfinite(limits).any(axis=0) if limits else np.zeros(np.diff(along.batch.x, axis=1).shape, bool)
+    covered: NDArray[np.bool_] = np.zeros(np.diff(along.batch.x, axis=1).shape, bool)
+    for capacity in limits:
+        covered |= np.isfinite(capacity)
     open_pieces = np.where(covered, np.inf, 1.0)
     if covered.all():
         nothing, first = np.zeros(len(covered)), np.zeros(len(covered), np.intp)

@@ -52,7 +52,7 @@ def unit() -> bool:
 def wasm() -> bool:
     """The tests of pysolver once more, in Pyodide under Node, against the archives that ship."""
     wheels = [*downloads.pure_wheels(PYTEST_WHEELS), runtime.ensure()[0]]
-    options = ("--disable-warning=MODULE_TYPELESS_PACKAGE_JSON", "--stack-size=4000")
+    options = ("--disable-warning=MODULE_TYPELESS_PACKAGE_JSON",)  # and Node's usual stack, about that of a browser's worker
     return call([node.node(), *options, TOOLS / "pyodide" / "run_pytest.mjs", DIST, ROOT / "tests", *wheels], node.environment())
 
 
