@@ -21,7 +21,7 @@ from pysolver.governing import least_reaction
 from pysolver.limits import name_of_sheet
 from pysolver.model import span_rule
 from pysolver.outcome import CLEAR, Compared, lapsed, ruled_out, state, valid_until, what_now
-from pysolver.record import VERSION, Record
+from pysolver.record import VERSION, Record, moment
 from pysolver.statics import extremes, solve
 from pysolver.vocabulary import words
 
@@ -78,8 +78,17 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
             "rules_out": ", ".join(_decision_label(d) for d in ruled_out(decided, old=old)) or "nothing",
             "missing": [{"text": g.text, "who": g.who, "path": g.path} for g in decided.gaps],
             "treated_as_over": decided.treated_as_over, "lapsed": old,
-            "as_found": f"as found at {record['found_at']}" if record["found_at"] else "the time it was found is not stated",
+            "as_found": as_found(record["found_at"]),
             "until": until}
+
+
+def as_found(found_at: str | None) -> str:
+    """When the beam was found so, in the time of the place where it was found."""
+    at = moment(found_at) if found_at else None
+    if at is None:
+        return "the time it was found is not stated"
+    zone = at.strftime("%z")
+    return f"as found at {at.day} {at:%B %Y, %H:%M} (UTC{zone[:3]}:{zone[3:5]})"
 
 
 def _decision_label(choice: str) -> str:
@@ -90,9 +99,9 @@ def bar_numbers(leading: Compared | None) -> str:
     """Second line of the bar: what governs, where, its ratio and how far it may range."""
     if leading is None or leading.ratio is None:
         return "No ratio to a limit can be given yet."
-    text = f"{leading.title}, {leading.place}: {show_ratio(leading.ratio)} of the limit"
+    text = f"{leading.title}, {leading.place}: {show_ratio(leading.ratio)}"
     if leading.high is not None and leading.low is not None:
-        text += f", range {show_ratio(leading.low)} to {show_ratio(leading.high)}"
+        text += f" ({show_ratio(leading.low)} to {show_ratio(leading.high)})"
     return text
 
 

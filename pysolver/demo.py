@@ -35,7 +35,7 @@ def entry(id_: str, criterion: str, value: str, **more: Any) -> Record:
 def demo() -> Record:
     """The demonstration record; the page gives it a new id and times."""
     record = blank()
-    record.update(id="demo", notes="An invented example to try things on. No such terrace exists.")
+    record.update(id="demo")
     record["place"] = {"site": "Terrace over the boat hall (invented)", "member": "T4", "drawing": "TG-17", "revision": "B",
                        "stage": "deck laid, planting not yet"}
     record["ends"] = {"left": "hall wall", "right": "quay side"}

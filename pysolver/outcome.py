@@ -202,9 +202,9 @@ def what_now(outcome: Outcome, until: str, *, old: bool = False) -> str:
     if outcome.word == CLEAR:
         return "Everyone away from on and under it, now. Then phone."
     if outcome.treated_as_over:
-        return "Rules out holding. Take load off, nobody on or under it, tell the person in charge."
+        return "Rules out holding: take load off, nobody on or under it, tell the person in charge."
     if outcome.word in (CLOSE, CANNOT) or old:
-        return "Rules out carrying on. Hold: add nothing, measure again or phone."
+        return "Rules out carrying on: add nothing, measure again or phone."
     if outcome.word == WITHIN:
         return f"Nothing here stops the work; nothing moved or added until {until} or any change."
     return "Working on the ranges. Add nothing meanwhile."

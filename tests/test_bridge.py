@@ -9,10 +9,10 @@ from typing import Any
 import pytest
 from hypothesis import HealthCheck, given, settings
 from hypothesis import strategies as st
+from records import clear_span, overhanging, point, q, simple, texts, two_spans
 
 from pysolver.bridge import CALLS, examples, handle
 from pysolver.demo import demo
-from records import clear_span, overhanging, point, q, simple, texts, two_spans
 
 FORBIDDEN = {"safe", "pass", "passed", "passes", "approved", "ok", "okay"}
 
@@ -78,21 +78,24 @@ def test_a_record_nested_without_end_is_an_input_error() -> None:
     assert asked(text)["error"]["kind"] == "input"
 
 
-@pytest.mark.parametrize("fragment", ["", "#", "r1.", "r1.abc.def", "https://example.invalid/#r1.AAAA.AAAAAAAAAAAA", "x" * 300_000, "r9.a.b"])
+@pytest.mark.parametrize("fragment", ["", "#", "r1.", "r1.abc.def", "https://example.invalid/#r1.AAAA.AAAAAAAAAAAA",
+                                      "x" * 300_000, "r9.a.b"])
 def test_a_link_that_is_none_is_an_input_error(fragment: str) -> None:
     assert asked({"call": "open", "fragment": fragment})["error"]["kind"] == "input"
 
 
-@pytest.mark.parametrize("given", [{"dimension": "length", "text": "five", "unit": "m"}, {"dimension": "length", "text": "", "unit": "m"},
-                                   {"dimension": "force", "text": "1,200", "unit": "kg"}, {"dimension": "force", "text": "2 ton", "unit": ""},
-                                   {"dimension": "length", "text": "9" * 500, "unit": "m"}])
+@pytest.mark.parametrize("given", [
+    {"dimension": "length", "text": "five", "unit": "m"}, {"dimension": "length", "text": "", "unit": "m"},
+    {"dimension": "force", "text": "1,200", "unit": "kg"}, {"dimension": "force", "text": "2 ton", "unit": ""},
+    {"dimension": "length", "text": "9" * 500, "unit": "m"}])
 def test_a_number_that_cannot_be_read_is_an_input_error(given: dict[str, str]) -> None:
     assert asked({"call": "read", **given})["error"]["kind"] == "input"
 
 
 def test_a_number_is_read_with_its_value() -> None:
     """18' 4 1/2" = 220.5 in = 5.6007 m (inch of 25.4 mm, 1959)."""
-    assert asked({"call": "read", "dimension": "length", "text": "18' 4 1/2\"", "unit": "m"})["result"]["value"] == pytest.approx(5.6007)
+    request = {"call": "read", "dimension": "length", "text": "18' 4 1/2\"", "unit": "m"}
+    assert asked(request)["result"]["value"] == pytest.approx(5.6007)
 
 
 def test_the_best_estimate_comes_with_the_same_numbers_as_the_full_answer() -> None:
@@ -129,22 +132,32 @@ def replaced(record: Any, path: tuple[Any, ...], value: Any) -> Any:
     return made
 
 
-NUMBERS = ["0 m", "0", "-1 m", "0.001 m", "1e3 m", "999 m", "5.40 m", "1e-9 m", "0 kN/m", "-50 kN/m", "1e7 kN/m", "3 kNm", "2 t", "nan", "inf", "L/250",
+NUMBERS = ["0 m", "0", "-1 m", "0.001 m", "1e3 m", "999 m", "5.40 m", "1e-9 m", "0 kN/m", "-50 kN/m", "1e7 kN/m", "3 kNm",
+           "2 t", "nan", "inf", "L/250",
            "200 mm", "1 mm", "9999 mm", "0.0001 kN", "1e5 kN", "17500 kNm2", "1 Nmm2", "1e10 kNm2", "", "½ in", "1'2\""]
-WORDS = [None, "permanent", "stored", "bearing", "pinned", "fixed", "spring", "free", "support", "left_end", "right_end", "face", "clear", "centres",
-         "effective", "factored", "unfactored", "own", "asce7-16-lrfd", "asce7-16-asd", "en1990-6.10-str", "unfactored", "not_known", "added", "all",
-         "sagging", "hogging", "reaction", "hold_down", "sag", "line_load", "area_load", "near_edge", "middle", "self weight", "paving",
+WORDS = [None, "permanent", "stored", "bearing", "pinned", "fixed", "spring", "free", "support", "left_end", "right_end",
+         "face", "clear", "centres", "effective", "factored", "unfactored", "own", "asce7-16-lrfd", "asce7-16-asd",
+         "en1990-6.10-str", "not_known", "added", "all", "sagging", "hogging", "reaction", "hold_down", "sag", "line_load",
+         "area_load", "near_edge", "middle", "self weight", "paving",
          "settlement of support 0", "pack1", "none", "something", "same", "full", "spacing"]
-QUANTITIES = st.builds(lambda text, means, low, high: {"text": text, **({"means": means} if means else {}),
-                                                       **({"low": low, "high": high} if means == "stated" else {})},
-                       st.sampled_from(NUMBERS), st.sampled_from([None, "tape", "exact", "design", "by_eye", "counted", "level", "stated"]),
-                       st.sampled_from(NUMBERS), st.sampled_from(NUMBERS))
-JSON = st.recursive(st.none() | st.booleans() | st.integers(-3, 14) | st.integers() | st.floats(allow_nan=False, allow_infinity=False)
-                    | st.text(max_size=8), lambda inner: st.lists(inner, max_size=3) | st.dictionaries(st.text(max_size=5), inner, max_size=3),
+MEANS = [None, "tape", "exact", "design", "by_eye", "counted", "level", "stated"]
+FROM, SIDE = ["left_end", "right_end", "support", None], ["left", "right", None]
+AT, TO = ["face", "centre", None], ["middle", "near_edge", None]
+
+
+def quantity(text: str, means: str | None, low: str, high: str) -> dict[str, str]:
+    return {"text": text, **({"means": means} if means else {}), **({"low": low, "high": high} if means == "stated" else {})}
+
+
+TEXTS = st.sampled_from(NUMBERS)
+QUANTITIES = st.builds(quantity, TEXTS, st.sampled_from(MEANS), TEXTS, TEXTS)
+LEAVES = (st.none() | st.booleans() | st.integers(-3, 14) | st.integers() | st.text(max_size=8)
+          | st.floats(allow_nan=False, allow_infinity=False))
+JSON = st.recursive(LEAVES, lambda inner: st.lists(inner, max_size=3) | st.dictionaries(st.text(max_size=5), inner, max_size=3),
                     max_leaves=6)
-POSITIONS = st.fixed_dictionaries({"from": st.sampled_from(["left_end", "right_end", "support", None]), "support": st.sampled_from([None, 0, 1, 2, 12]),
-                                   "side": st.sampled_from(["left", "right", None]), "at": st.sampled_from(["face", "centre", None]),
-                                   "to": st.sampled_from(["middle", "near_edge", None]), "distance": st.none() | QUANTITIES})
+POSITIONS = st.fixed_dictionaries({"from": st.sampled_from(FROM), "support": st.sampled_from([None, 0, 1, 2, 12]),
+                                   "side": st.sampled_from(SIDE), "at": st.sampled_from(AT), "to": st.sampled_from(TO),
+                                   "distance": st.none() | QUANTITIES})
 VALUES = QUANTITIES | POSITIONS | st.sampled_from(WORDS) | st.sampled_from([0, 1, 2, True, False, [], {}]) | JSON
 BASES = [demo(), simple(), overhanging(), two_spans(), clear_span("3.00 m", "150 mm", "300 mm"),
          overhanging(loads=[point("a", q("4 kN", "counted"), "5.5 m")])]
@@ -173,7 +186,8 @@ def quantity_places(base: Any) -> list[tuple[Any, ...]]:
 
 @settings(max_examples=50, suppress_health_check=[HealthCheck.too_slow])
 @given(st.sampled_from(BASES[:4]), st.randoms(use_true_random=False), st.lists(QUANTITIES, min_size=1, max_size=3))
-def test_other_numbers_in_their_places_are_an_answer_and_never_our_fault(base: Any, rng: random.Random, values: list[Any]) -> None:
+def test_other_numbers_in_their_places_are_an_answer_and_never_our_fault(base: Any, rng: random.Random,
+                                                                         values: list[Any]) -> None:
     record = base
     for value in values:
         record = replaced(record, rng.choice(quantity_places(base)), value)
@@ -183,7 +197,8 @@ def test_other_numbers_in_their_places_are_an_answer_and_never_our_fault(base: A
 
 
 @pytest.mark.parametrize("change", [
-    pytest.param((("overhangs", "left"), {"text": "0.1 m", "means": "stated", "low": "0 m", "high": "0.3 m"}), id="overhang from nothing"),
+    pytest.param((("overhangs", "left"), {"text": "0.1 m", "means": "stated", "low": "0 m", "high": "0.3 m"}),
+                 id="overhang from nothing"),
     pytest.param((("loads", 0, "source"), "self weight"), id="source called self weight"),
     pytest.param((("loads", 0, "source"), "settlement of support 0"), id="source called like a settlement"),
     pytest.param((("spans", 0, "length", "value"), 10**400), id="value beyond floats"),

@@ -7,10 +7,10 @@ from pathlib import Path
 from typing import Any
 
 import pytest
+from records import SAG, SHEAR, entry, q, sheet, simple
 
 from pysolver.cli import main
 from pysolver.demo import demo
-from records import SAG, SHEAR, entry, q, sheet, simple
 
 EN = {"basis": "factored", "set": "en1990-6.10-str"}
 URL = "https://example.invalid/app/"
@@ -50,7 +50,8 @@ def saved(tmp_path: Path) -> Any:
 
 
 @pytest.mark.parametrize(("record", "code", "words"), [
-    (simple(), 0, "WITHIN THE ENTERED LIMITS"), (unranged(), 1, "CLOSE: RANGES NOT STATED"), (limited("40 kNm"), 3, "OVER THE ENTERED LIMIT"),
+    (simple(), 0, "WITHIN THE ENTERED LIMITS"), (unranged(), 1, "CLOSE: RANGES NOT STATED"),
+    (limited("40 kNm"), 3, "OVER THE ENTERED LIMIT"),
     (changed("condition/void", VOID, limited("40 kNm")), 3, "CANNOT BE JUDGED; THE NUMBERS ALONE ARE OVER"),
     (changed("condition/void", VOID), 4, "CANNOT BE JUDGED"), (limited("43 kNm", **EN), 5, "CLEAR THE AREA"),
 ], ids=["within", "close", "over", "void and over", "cannot", "clear"])
@@ -161,7 +162,8 @@ def test_a_lapsed_outcome_never_ends_as_within(saved: Any, monkeypatch: pytest.M
 @pytest.mark.cpython_only
 def test_the_command_runs_as_a_module_and_reads_standard_input() -> None:
     record = json.dumps(limited("43 kNm", **EN))
-    ended = subprocess.run([sys.executable, "-m", "pysolver", "check", "-"], input=record, capture_output=True, text=True, timeout=60, check=False)
+    ended = subprocess.run([sys.executable, "-m", "pysolver", "check", "-"], input=record, capture_output=True, text=True,
+                           timeout=60, check=False)
     assert ended.returncode == 5
     assert "CLEAR THE AREA" in ended.stdout
     assert ended.stderr == ""
@@ -171,7 +173,8 @@ def test_the_command_runs_as_a_module_and_reads_standard_input() -> None:
 def test_a_hostile_file_never_ends_as_close(tmp_path: Path) -> None:
     """A Python traceback ends with 1, which is "close" here."""
     (tmp_path / "deep.json").write_text("[" * 200_000)
-    ended = subprocess.run([sys.executable, "-m", "pysolver", "check", str(tmp_path / "deep.json")], capture_output=True, text=True, timeout=60,
+    ended = subprocess.run([sys.executable, "-m", "pysolver", "check", str(tmp_path / "deep.json")], capture_output=True,
+                           text=True, timeout=60,
                            check=False)
     assert ended.returncode == 6
     assert "Traceback" not in ended.stderr

@@ -6,10 +6,10 @@ forms being printed in a city code that adopts them.
 """
 
 import pytest
+from records import SAG, SHEAR, bare, beam, entry, everywhere, generous, one, outcome_of, overhanging, point, sheet
 
 from pysolver.check import run_check
 from pysolver.combinations import Source, cases, own_set, sets
-from records import SAG, SHEAR, beam, bare, entry, everywhere, generous, one, outcome_of, overhanging, point, sheet
 
 EXACT = 1e-9
 Q = dict[str, float]
@@ -145,7 +145,8 @@ def test_no_factored_case_takes_less_than_the_load_where_it_adds_and_leads(name:
 
 
 def test_the_shown_name_of_the_governing_combination_is_the_one_with_these_factors() -> None:
-    loads = [everywhere("dead", "0 kN/m"), point("imposed", "6 kN", "2.00 m", "imposed"), point("snow", "20 kN", "2.00 m", "snow")]
+    loads = [everywhere("dead", "0 kN/m"), point("imposed", "6 kN", "2.00 m", "imposed"),
+             point("snow", "20 kN", "2.00 m", "snow")]
     limits = [sheet(entry(SAG, "1000 kNm"), entry(SHEAR, "1000 kN"), basis="factored", set="asce7-16-lrfd", span=bare("4 m"))]
     record = beam(["4.00 m"], loads=loads, limits=limits)
     assert one(run_check(record), SAG).case == "1.2D + 1.6S + L"

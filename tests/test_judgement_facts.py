@@ -7,10 +7,6 @@ any handbook (hogging w L^2 / 8, sagging 9 w L^2 / 128, end reaction 3 w L / 8).
 import copy
 
 import pytest
-
-from pysolver.answer import answer
-from pysolver.check import run_check
-from pysolver.limits import capacity_at
 from records import (
     HOG,
     SAG,
@@ -33,6 +29,10 @@ from records import (
     two_spans,
     zone,
 )
+
+from pysolver.answer import answer
+from pysolver.check import run_check
+from pysolver.limits import capacity_at
 
 EXACT = 1e-9
 
@@ -268,7 +268,7 @@ def test_J5_a_load_as_limit_without_its_span_is_never_within() -> None:
 ])
 def test_J5_a_load_as_limit_is_never_within_on_anything_but_a_simple_span(change: dict) -> None:  # type: ignore[type-arg]
     limits = [sheet(entry("line_load", "800 kN/m"), entry(HOG, "900 kNm"), span=bare("6 m"))]
-    assert outcome_of(beam(**{"spans": ["6 m"], "limits": limits})) == "within"
+    assert outcome_of(beam(spans=["6 m"], limits=limits)) == "within"
     assert outcome_of(beam(**{"spans": ["6 m"], "limits": limits, **change})) == "cannot"
 
 

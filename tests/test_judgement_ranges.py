@@ -3,10 +3,6 @@ search for the worst of the box, is in test_bounds.py). Numbers are worked out b
 """
 
 import pytest
-
-from pysolver.answer import answer
-from pysolver.check import run_check
-from pysolver.record import blank
 from records import (
     HOG,
     SAG,
@@ -27,6 +23,10 @@ from records import (
     strip,
     two_spans,
 )
+
+from pysolver.answer import answer
+from pysolver.check import run_check
+from pysolver.record import blank
 
 EXACT = 1e-9
 
@@ -101,7 +101,8 @@ def factored(**more: object) -> dict:  # type: ignore[type-arg]
     return {"basis": "factored", "set": "en1990-6.10-str", **more}
 
 
-@pytest.mark.parametrize(("means", "high"), [("exact", 1.35), ("weighed", 1.35 * 1.02), ("counted", 1.35 * 1.10), (None, 1.35 * 2)])
+@pytest.mark.parametrize(("means", "high"), [("exact", 1.35), ("weighed", 1.35 * 1.02), ("counted", 1.35 * 1.10),
+                                             (None, 1.35 * 2)])
 def test_J14_a_factor_is_never_reduced_because_something_was_weighed(means: str | None, high: float) -> None:
     sagging = one(run_check(floor(q("2 kN/m", means), **factored())), SAG)
     assert sagging.unfactored == pytest.approx(9e3, rel=EXACT)

@@ -5,12 +5,12 @@ import json
 from typing import Any
 
 import pytest
+from records import bare, point, simple, two_spans
 
 from pysolver.check import run_check
 from pysolver.demo import demo
 from pysolver.errors import InputError
 from pysolver.record import SUPPORT_NAMES, blank, validated
-from records import bare, point, simple, two_spans
 
 
 def refused(document: Any) -> InputError:
@@ -78,7 +78,8 @@ def test_unknown_keys_are_refused_at_their_place(path: str) -> None:
     ("/spans/0/length/value", "6"), ("/spans/0/length/means", 3), ("/spans/0/measure", "guess"), ("/supports/0/kind", "glued"),
     ("/loads", {}), ("/loads/0", None), ("/loads/0/whole_beam", None), ("/loads/0/whole_beam", 1), ("/loads/0/removable", "yes"),
     ("/loads/1/position/from", "middle"), ("/loads/1/position/support", -1), ("/loads/1/position/support", 1.5),
-    ("/loads/0/photos", ["not a hash"]), ("/loads/0/name", "x" * 201), ("/limits/0/basis", "working"), ("/limits/0/entries", None),
+    ("/loads/0/photos", ["not a hash"]), ("/loads/0/name", "x" * 201), ("/limits/0/basis", "working"),
+    ("/limits/0/entries", None),
     ("/limits/0/entries/0/criterion", None), ("/limits/0/entries/0/value", 70), ("/condition/distress/ends", "ok"),
     ("/condition/distress", None), ("/condition/void/which", "holes"), ("/found_at", "yesterday"), ("/found_at", 0),
     ("/settings/display", "imperial"), ("/decision", "carry_on"), ("/notes", None),
@@ -133,7 +134,8 @@ def test_two_things_with_one_id_are_refused(name: str) -> None:
 
 
 @pytest.mark.parametrize(("path", "value", "field"), [
-    ("/loads/1/position", {"from": "support", "support": 5, "side": "left", "at": "centre", "to": "middle", "distance": bare("1 m")},
+    ("/loads/1/position", {"from": "support", "support": 5, "side": "left", "at": "centre", "to": "middle",
+                           "distance": bare("1 m")},
      "/loads/1/position/support"),
     ("/limits/0/entries/0/support", 9, "/limits/0/entries/0/support"),
     ("/limits/0/covers_loads", ["gone"], "/limits/0/covers_loads"),
@@ -151,7 +153,9 @@ def fields_of(record: dict[str, Any]) -> list[str]:
         result = run_check(record)
     except InputError as error:
         return [error.field]
-    return [*(e.field for e in result.errors), *(gap.path for gap in result.outcome.gaps)] if result.outcome.word == "cannot" else []
+    if result.outcome.word != "cannot":
+        return []
+    return [*(error.field for error in result.errors), *(gap.path for gap in result.outcome.gaps)]
 
 
 def test_a_free_end_between_two_supports_is_refused() -> None:

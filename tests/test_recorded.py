@@ -6,6 +6,7 @@ import math
 from typing import Any
 
 import pytest
+from records import SAG, SHEAR, entry, q, sheet, simple, two_spans
 
 from pysolver.check import run_check
 from pysolver.demo import demo
@@ -13,7 +14,6 @@ from pysolver.errors import InputError
 from pysolver.link import decode, encode
 from pysolver.record import blank
 from pysolver.recorded import carried, differences, opened, short
-from records import SAG, SHEAR, entry, q, sheet, simple, two_spans
 
 
 def travelled(record: dict[str, Any]) -> dict[str, Any]:

@@ -18,6 +18,9 @@ export function OutcomeShape({ word }) {
   return html`<svg class="outcome-shape" viewBox="0 0 48 48" aria-hidden="true">${shapes[word] ?? shapes.working}</svg>`;
 }
 
+/** @type {Record<string, string>} */
+export const WORDS = { within: 'WITHIN', close: 'CLOSE', over: 'OVER', cannot: 'NOT JUDGED', clear: 'CLEAR AREA', working: 'WAIT' };
+
 /** @param {Controller} controller @returns {{word:string, lines:string[], typing:boolean}} */
 export function barOf(controller) {
   const { current, typing, solver, answer } = controller.state;
@@ -37,7 +40,7 @@ export function OutcomeBar({ controller }) {
   const { word, lines, typing } = barOf(controller);
   const go = () => controller.go(controller.state.current.value?.refusal?.field || '/result');
   return html`<button class=${`outcome-bar is-${word} ${typing ? 'is-typing' : ''}`} aria-label=${`Outcome: ${lines.filter(Boolean).map((line) => line.replace(/\.$/, '')).join('. ')}. Open the result`} onClick=${go}>
-    <span class="outcome-mark"><${OutcomeShape} word=${word} /></span>
+    <span class="outcome-mark" aria-hidden="true"><${OutcomeShape} word=${word} /><b class="outcome-word">${WORDS[word] ?? ''}</b></span>
     <span class="outcome-lines" role="status" aria-live="polite">${[0, 1, 2].map((i) => html`<span key=${i} class=${i === 0 ? 'outcome-first' : ''}>${lines[i] ?? ''}</span>`)}</span>
   </button>`;
 }
