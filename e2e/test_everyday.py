@@ -97,7 +97,7 @@ def test_a_half_typed_number_never_shows_an_outcome_of_its_own(phone: Device) ->
     before = title(page)
     person.go_to("Load 2: pack of paving")
     person.tap(page.get_by_role("textbox", name=SIZE, exact=True))
-    for sign in ("Backspace", "Backspace", "Backspace", "Backspace", "Backspace", "Backspace", "9", "9", "0"):
+    for sign in (*["Backspace"] * 6, "9", "9", "0", "Unit kN/m"):
         person.key(sign)
         expect(page.get_by_role("button", name=TYPING)).to_be_visible()
         expect(person.bar()).to_have_class("outcome-bar is-close is-typing")
@@ -107,11 +107,38 @@ def test_a_half_typed_number_never_shows_an_outcome_of_its_own(phone: Device) ->
     expect(page.get_by_text("typing: this result is for the earlier values")).to_be_visible()
     assert title(page) == before
     person.go_to("Load 2: pack of paving")
-    expect(page.get_by_role("textbox", name=SIZE, exact=True)).to_have_value("1990")
+    expect(page.get_by_role("textbox", name=SIZE, exact=True)).to_have_value("1990 kN/m")
     person.press(f"Enter, {SIZE}")
     expect(page.get_by_role("button", name=TYPING)).to_have_count(0)
     person.result()
     expect(judged(page)).to_have_class("verdict is-over", timeout=START)
+
+
+def test_no_key_moves_away_under_the_finger(phone: Device) -> None:
+    """The bar changes its words at the first key; a second touch at the same place must hit the same key."""
+    person = demonstration(phone.open())
+    person.go_to("Load 2: pack of paving")
+    person.tap(person.page.get_by_role("textbox", name=SIZE, exact=True))
+    three = person.pad().get_by_role("button", name="3", exact=True)
+    before = three.bounding_box()
+    person.key("3")
+    expect(person.page.get_by_role("button", name=TYPING)).to_be_visible()
+    assert three.bounding_box() == before
+
+
+def test_a_bare_number_takes_the_unit_printed_beside_it(phone: Device) -> None:
+    person = demonstration(phone.open())
+    page = person.page
+    person.go_to("Load 2: pack of paving")
+    person.tap(page.get_by_role("textbox", name=SIZE, exact=True))
+    for _ in "16 kN/m":
+        person.key("Backspace")
+    person.key("9")
+    expect(page.locator(".pad-panel .printed-unit")).to_have_text("kN/m")
+    person.key("Next")
+    expect(page.get_by_role("button", name=TYPING)).to_have_count(0, timeout=START)
+    person.go_to("Load 2: pack of paving")
+    expect(page.get_by_text("= 9.00 kN/m")).to_be_visible(timeout=START)
 
 
 def test_drafts_and_answers_outlive_a_reload_and_the_end_of_the_browser(phone: Device) -> None:

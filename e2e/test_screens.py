@@ -30,6 +30,20 @@ CUT_OFF = """() => [...document.querySelectorAll('button, label, p, h1, h2, h3, 
   .filter((one) => one.getBoundingClientRect().right > innerWidth + 1 && !one.closest('.drawing'))
   .map((one) => one.textContent.trim().slice(0, 60))"""
 
+# With the check screen in view only its middle scrolls: the bar at the foot never leaves.
+BAR_LEAVES = """() => { const bar = document.querySelector('.outcome-bar');
+  if (!bar) return false;
+  scrollTo(0, 10000);
+  const away = scrollY > 1 || bar.getBoundingClientRect().bottom > innerHeight + 1;
+  scrollTo(0, 0);
+  return away; }"""
+
+# Above the number pad stands which number it is for.
+LABEL_COVERED = """() => { const label = document.querySelector('.pad-panel label');
+  if (!label) return false;
+  const box = label.getBoundingClientRect();
+  return [box.top + 2, box.bottom - 2].some((y) => !label.contains(document.elementFromPoint(box.left + 8, y))); }"""
+
 
 def faults(page: Page, name: str, *, wide: bool) -> list[str]:
     """What is wrong with the screen as it stands; also takes its picture."""
@@ -41,6 +55,10 @@ def faults(page: Page, name: str, *, wide: bool) -> list[str]:
     width = page.evaluate("innerWidth")
     if width != (1280 if wide else 360):
         wrong.append(f"the page is {width} px wide")
+    if page.evaluate(BAR_LEAVES):
+        wrong.append("the bar at the foot can be scrolled away")
+    if page.evaluate(LABEL_COVERED):
+        wrong.append("the name of the number above the pad is covered")
     wrong += [f"cut off at the right: {text}" for text in page.evaluate(CUT_OFF)]
     if not wide:
         wrong += [f"too small to touch: {text}" for text in page.evaluate(TARGETS)]

@@ -15,6 +15,7 @@ from pysolver.check import run_check
 from pysolver.demo import demo
 from pysolver.display import also, field_units, show
 from pysolver.errors import InputError, InternalError
+from pysolver.json_text import loads
 from pysolver.link import decode, encode
 from pysolver.loads import LineLoad
 from pysolver.record import blank
@@ -32,7 +33,7 @@ def handle(text: str) -> str:
     try:
         if len(text) > MAX_REQUEST:
             raise InputError(code="too_large", message="That is too much data for one check.")
-        request = _loaded(text)
+        request = loads(text)
         call = CALLS.get(str(request.get("call"))) if isinstance(request, dict) else None
         if call is None:
             raise InternalError(code="call", message="The page asked for something that the solver does not know.")
@@ -45,13 +46,6 @@ def handle(text: str) -> str:
     except Exception as error:  # the last door: whatever it is, the page must hear of it and go on
         return _failed("internal", type(error).__name__, "", "Something in the solver broke. This is our fault, not yours; "
                        f"nothing is lost. ({type(error).__name__}: {str(error)[:300]})")
-
-
-def _loaded(text: str) -> Any:
-    try:
-        return json.loads(text)
-    except RecursionError:
-        raise InputError(code="too_deep", message="This is nested deeper than any record. Ask for it again.") from None
 
 
 def _failed(kind: str, code: str, field: str, message: str) -> str:

@@ -16,6 +16,8 @@ from typing import Any
 from pysolver import __version__
 from pysolver.bridge import handle
 from pysolver.demo import demo
+from pysolver.errors import InputError
+from pysolver.json_text import loads
 
 EXIT = {"within": 0, "close": 1, "over": 3, "cannot": 4, "clear": 5}
 UNREADABLE, DIFFERS, OUR_FAULT = 6, 7, 70
@@ -84,9 +86,9 @@ def _record(path: str) -> Any:
     if len(raw) > MAX_FILE:
         raise _CommandError(f"{path} is larger than {MAX_FILE} bytes, which no record is.", UNREADABLE)
     try:
-        document = json.loads(raw)
-    except RecursionError:
-        raise _CommandError(f"{path} is nested deeper than any record.", UNREADABLE) from None
+        document = loads(raw.decode())
+    except InputError as error:
+        raise _CommandError(f"{path}: {error.message}", UNREADABLE) from None
     except ValueError as error:
         raise _CommandError(f"{path} is not JSON: {error}. Export the record again.", UNREADABLE) from None
     return document["record"] if isinstance(document, dict) and "record" in document else document

@@ -24,16 +24,14 @@ from collections.abc import Mapping
 from typing import Any
 
 from pysolver.errors import InputError
+from pysolver.json_text import loads
 from pysolver.link_dictionary import DICTIONARY_R1
 
 VERSION = "r1"
 MAX_FRAGMENT = 200_000  # characters
 MAX_INFLATED = 2_000_000  # bytes
-MAX_DEPTH = 32
 CHECKSUM_LENGTH = 12
 
-# Strings (closed or not) are skipped as a whole; possessive, so that hostile text costs linear time.
-_STRING_OR_BRACKET = re.compile(rb'"(?:[^"\\]|\\.)*+"?|[][{}]', re.DOTALL)
 _BASE64URL = re.compile(r"[A-Za-z0-9_-]+")
 _AROUND = " \t\r\n<>()\"'.,;"  # what mail programs and sentences leave around a link; none of it ends a fragment
 
@@ -79,27 +77,13 @@ def _canonical(payload: Mapping[str, Any]) -> bytes:
 
 def _parse(raw: bytes) -> dict[str, Any]:
     """Read canonical JSON; anything else (doubled keys, NaN, 1e999, other spacing) does not survive the way back."""
-    if _depth(raw) > MAX_DEPTH:
-        raise _not_a_record()
     try:
-        payload = json.loads(raw.decode())
-    except ValueError:
+        payload = loads(raw.decode())
+    except (ValueError, InputError):
         raise _not_a_record() from None
     if not isinstance(payload, dict) or _canonical(payload) != raw:
         raise _not_a_record()
     return payload
-
-
-def _depth(raw: bytes) -> int:
-    """How deep brackets nest, counted before the JSON reader (which recurses) sees them."""
-    depth = deepest = 0
-    for found in _STRING_OR_BRACKET.finditer(raw):
-        if found[0] in b"[{":
-            depth += 1
-            deepest = max(deepest, depth)
-        elif found[0] in b"]}":
-            depth -= 1
-    return deepest
 
 
 def _inflate(packed: bytes) -> bytes:

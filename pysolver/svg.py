@@ -7,7 +7,7 @@ readable where no style sheet is loaded (a printed report, a file opened by itse
 
 import math
 from collections.abc import Iterable, Sequence
-from xml.sax.saxutils import escape, quoteattr
+from html import escape as escape_html
 
 from pysolver.errors import InternalError
 
@@ -42,7 +42,7 @@ def text(x: float, y: float, words: str, classes: str = "label", *, anchor: str 
     """One line of text with its baseline at y. anchor: start, middle or end. turned: reads from bottom to top."""
     turn = f' transform="rotate(-90 {num(x)} {num(y)})"' if turned else ""
     return (f'<text{_class(classes)} x="{num(x)}" y="{num(y)}" text-anchor="{anchor}" font-size="{num(size)}"'
-            f' fill="currentColor" stroke="none"{turn}>{escape(clean(words))}</text>')
+            f' fill="currentColor" stroke="none"{turn}>{escape_html(clean(words))}</text>')
 
 
 def line(x0: float, y0: float, x1: float, y1: float, classes: str, **extra: str) -> str:
@@ -74,12 +74,12 @@ def group(parts: Iterable[str], classes: str, **extra: str) -> str:
 
 def _class(classes: str) -> str:
     """Nothing for a part that takes the ink of its group."""
-    return f" class={quoteattr(classes)}" if classes else ""
+    return f' class="{escape_html(classes)}"' if classes else ""
 
 
 def _extra(extra: dict[str, str]) -> str:
     """Presentation attributes, as stroke_width="2"."""
-    return "".join(f" {name.replace('_', '-')}={quoteattr(value)}" for name, value in extra.items())
+    return "".join(f' {name.replace("_", "-")}="{escape_html(value)}"' for name, value in extra.items())
 
 
 def hatched(x: float, y: float, width: float, height: float, step: float = 5.0) -> str:
@@ -100,6 +100,6 @@ def document(width: float, height: float, parts: Iterable[str], *, name: str, ti
     ids = f"asfound-{name}-title", f"asfound-{name}-desc"
     return (f'<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 {num(width)} {num(height)}" role="img"'
             f' aria-labelledby="{ids[0]} {ids[1]}" fill="none" stroke="currentColor" font-family="sans-serif">'
-            f'<title id="{ids[0]}">{escape(clean(title))}</title>'
-            f'<desc id="{ids[1]}">{escape(clean(description, 2000))}</desc>'
+            f'<title id="{ids[0]}">{escape_html(clean(title))}</title>'
+            f'<desc id="{ids[1]}">{escape_html(clean(description, 2000))}</desc>'
             f'{"".join(parts)}</svg>')

@@ -15,7 +15,7 @@ LAYERS = [
     "comparison", "model", "uplift", "outcome", "governing", "check",
     "svg", "drawing_bezier", "drawing_labels", "drawing_symbols", "drawing_loads", "drawing_places", "drawing_scheme",
     "drawing_body", "drawing_curve_labels", "drawing_curves", "drawing", "figures", "answer", "recorded",
-    "link_dictionary", "link", "demo", "bridge", "cli", "__main__",
+    "json_text", "link_dictionary", "link", "demo", "bridge", "cli", "__main__",
 ]
 DOORS = {"bridge", "cli", "__main__"}
 OUTSIDE = {"js", "pyodide", "socket", "urllib", "http", "subprocess", "os", "pathlib", "shutil", "tempfile", "sys"}
