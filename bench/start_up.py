@@ -22,11 +22,11 @@ from pathlib import Path
 ROOT = Path(__file__).resolve().parent.parent
 sys.path.insert(0, str(ROOT))
 
-from playwright.sync_api import Playwright, sync_playwright  # noqa: E402
+from playwright.sync_api import Playwright, sync_playwright
 
-from tools import archive, assemble, chromium, downloads, precache, runtime  # noqa: E402
-from tools.paths import BUILD, DIST, NPM_PYODIDE, venv_python  # noqa: E402
-from tools.server import Site  # noqa: E402
+from tools import archive, assemble, chromium, downloads, precache, runtime
+from tools.paths import BUILD, DIST, NPM_PYODIDE, venv_python
+from tools.server import Site
 
 PAGE = '<!doctype html><meta charset="utf-8"><title>Start-up</title><script type="module" src="start-up.js"></script>'
 

@@ -58,7 +58,8 @@ class Person:
             self.key(sign)
         if unit:
             self.key(f"Unit {unit}")
-        expect(there).to_have_value(f"{figures} {unit}" if unit else figures)
+        if figures:
+            expect(there).to_have_value(f"{figures} {unit}" if unit else figures)
 
     def enter(self, name: str, figures: str, means: str | None = None, *, unit: str | None = None) -> None:
         """Key in a number, Next, and say how it is known if that is asked."""

@@ -12,7 +12,7 @@ from browsing import START, ready_without_signal, solver_ready
 from conftest import MakeDevice
 from playwright.sync_api import Page, expect
 from serving import SiteProcess
-from steps import Person, demonstration, new_check
+from steps import demonstration, new_check
 
 from tools import precache
 

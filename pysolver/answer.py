@@ -73,7 +73,10 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
     until = end.strftime("%H:%M") if end else "the end of this shift"
     first = f"as found earlier, look again. It was: {decided.title}" if old else decided.title
     memory = "; factors from memory" if decided.from_memory else ""
-    return {"word": decided.word, "title": decided.title, "reasons": list(decided.reasons),
+    chosen = record["decision"]["choice"] if record["decision"] else None
+    contrary = [f"The decision written down, {_decision_label(chosen)}, is one that this outcome rules out."] \
+        if chosen in ruled_out(decided, old=old) else []
+    return {"word": decided.word, "title": decided.title, "reasons": [*decided.reasons, *contrary],
             "lines": [first, bar_numbers(decided.leading) + memory, what_now(decided, until, old=old)],
             "rules_out": ", ".join(_decision_label(d) for d in ruled_out(decided, old=old)) or "nothing",
             "missing": [{"text": g.text, "who": g.who, "path": g.path} for g in decided.gaps],
@@ -253,7 +256,7 @@ def numbers(result: Result) -> dict[str, float]:
         return {}
     told: dict[str, float] = {}
     for i, j in enumerate(result.governed.best.layouts[0].real):
-        told[f"reaction N:{result.record['supports'][j]['name']}"] = float(result.response.reactions[i])
+        told[f"reaction N:{j + 1}{result.record['supports'][j]['name']}"] = float(result.response.reactions[i])
     for quantity, unit in (("shear", "N"), ("moment", "N·m"), *((("sag", "m"),) if _sag_known(result) else ())):
         top, bottom = extremes(result.response, quantity)
         told[f"{quantity} {unit}:largest"] = top.value

@@ -18,6 +18,7 @@ from pysolver.errors import InputError, InternalError
 from pysolver.json_text import loads
 from pysolver.link import decode, encode
 from pysolver.loads import LineLoad
+from pysolver.readings import is_part_of_span
 from pysolver.record import blank
 from pysolver.recorded import carried, opened, short
 from pysolver.statics import extremes, solve
@@ -75,10 +76,12 @@ def self_check(request: dict[str, Any]) -> dict[str, Any]:
 
 def read(request: dict[str, Any]) -> dict[str, Any]:
     """Read one written number for the line under the pad."""
-    dimension, system = request["dimension"], request.get("system", "metric")
-    if request.get("text", "").replace(" ", "").upper().startswith(("L/", "/")) and request.get("sag"):
-        return {"value": None, "shown": f"span divided by {request['text'].partition('/')[2].strip()}", "also": ""}
-    parsed = parse(dimension, str(request["text"])[:80], str(request.get("unit") or ""))
+    dimension, system, text = request["dimension"], request.get("system", "metric"), request["text"]
+    if not isinstance(text, str):
+        raise InternalError(code="call", message="The page asked to read something that is not a text.")
+    if request.get("sag") and is_part_of_span(text):
+        return {"value": None, "shown": f"span divided by {text.partition('/')[2].strip()}", "also": ""}
+    parsed = parse(dimension, text[:80], str(request.get("unit") or ""))
     return {"value": parsed.value, "text": parsed.text, "shown": show(dimension, parsed.value, system),
             "also": also(dimension, parsed.value, system) if dimension != "number" else ""}
 

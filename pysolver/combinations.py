@@ -101,7 +101,8 @@ def _leading(data: dict[str, Any], sources: Sequence[Source]) -> list[Case]:
         if s.category == PERMANENT:
             return inf, sup
         if s.category == SETTLED:
-            return 1.0, 1.0
+            adding, relieving = data.get("settlement", (1.0, 1.0))
+            return relieving, adding
         leads = s.category == leader or s.category is None  # not known: always the largest factor (J17)
         return 0.0, whole if leads else accompanying(s.category)
 

@@ -81,11 +81,7 @@ def ratio_of(along: Along, one: Judged, low: Floats, high: Floats) -> Worst:
     kind = one.criterion.kind
     if kind in ("reaction", "hold_down"):
         return _compare_reaction(along, one, low, high)
-    capacity = capacities(along, one)
-    if kind == "shear":
-        return _of_either_sign(along.influence("shear"), low, high, capacity)
-    name, sign = QUANTITY[kind]
-    return worst(along.influence(name), sign, low, high, capacity)
+    return _of_kind(along, kind, low, high, capacities(along, one))
 
 
 def _of_either_sign(influence: Influence, low: Floats, high: Floats, capacity: Floats) -> Worst:
@@ -132,10 +128,16 @@ def without_limit(along: Along, kind: str, all_judged: Sequence[Judged], low: Fl
     if covered.all():
         nothing, first = np.zeros(len(covered)), np.zeros(len(covered), np.intp)
         return Worst(ratio=nothing, effect=nothing, piece=first, s=nothing, case=first)
+    return _of_kind(along, kind, low, high, open_pieces)
+
+
+def _of_kind(along: Along, kind: str, low: Floats, high: Floats, capacity: Floats) -> Worst:
+    """Pieces without length stand between things in one place, as a load and the support under it: nothing is there."""
+    capacity = np.where(np.diff(along.batch.x, axis=1) > 0.0, capacity, np.inf)
     if kind == "shear":
-        return _of_either_sign(along.influence("shear"), low, high, open_pieces)
+        return _of_either_sign(along.influence("shear"), low, high, capacity)
     name, sign = QUANTITY[kind]
-    return worst(along.influence(name), sign, low, high, open_pieces)
+    return worst(along.influence(name), sign, low, high, capacity)
 
 
 def from_chord(along: Along) -> Floats:

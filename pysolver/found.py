@@ -162,7 +162,15 @@ def _in_record(record: Record, make: Callable[[], Any]) -> Any:
     try:
         return make()
     except InputError as error:
-        raise error.moved("/" + error.field.lstrip("/")) from None
+        raise error.moved(_in_words_of_the_record(error.field)) from None
+
+
+def _in_words_of_the_record(field: str) -> str:
+    """The field of the record behind a field of the beam."""
+    part, _, index = field.lstrip("/").partition("/")
+    known = {"spans": f"/spans/{index}/length", "length": "/spans/0/length", "hinges": f"/hinges/{index}/position",
+             "stiffness": "/section/stiffness", "supports": f"/supports/{index}" if index else "/supports"}
+    return known.get(part, field if field.startswith("/") else f"/{field}")
 
 
 def _stretches(record: Record, readings: Readings, pick: Pick, frame: Frame) -> tuple[Stretch, ...]:

@@ -31,6 +31,7 @@ Floats = NDArray[np.float64]
 
 WIDE = 0.02
 GATHERINGS = 25
+INSET = 1e-7
 NEGLIGIBLE = 1e-9  # of the load (times the length, for moments): rounding
 LIFTS = 1e-9  # share of the load below which a negative reaction is rounding
 
@@ -94,6 +95,10 @@ class _Search:
         low, high = (np.array([getattr(model.readings.measured[v], end) for v in model.variables]) for end in ("low", "high"))
         point = model.best_point()
         wide = wide_ranges(model, best, low, high)
+        placed = np.array([is_place_of_load(v) for v in model.variables], bool)
+        # where the end of its range is over a support, a load close beside the support makes the worse shear
+        inset = np.where(placed, INSET * (high - low), 0.0)
+        low, high = low + inset, high - inset
         found = search(self.evaluate, low, point, high, wide=wide, starts=self._gathered(low, high, wide))
         self.varied = tuple(model.variables[i] for i in found.together)
         self.not_varied = tuple(v for i, v in enumerate(model.variables) if i not in found.together)
@@ -207,7 +212,8 @@ def _compared(model: Model, one: Judged, best: _At, worst: _At | None, gaps: Seq
         bare=float(ratio_of(best.along, one, covered, covered).ratio[0]), factored=float(best.worst.effect[0]),
         worst=float(top.worst.effect[0]),
         capacity=_capacity(best, ratio, one), ratio=ratio if has_ratio else None, low=low if has_ratio else None,
-        high=float(worst.worst.ratio[0]) if has_ratio and worst else None, case=one.cases[int(best.worst.case[0])].name,
+        high=max(ratio, float(worst.worst.ratio[0])) if has_ratio and worst else None,
+        case=one.cases[int(best.worst.case[0])].name,
         searched=searched, worst_place=place_name(model.record, top.along.layouts[0], _x(top), criterion.support),
         derived=criterion.derived, under=criterion.under, withheld=held, ranged=model.ranged)
 

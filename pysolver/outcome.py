@@ -219,6 +219,9 @@ def valid_until(found_at: str | None, stated: str | None) -> datetime | None:
 
 
 def lapsed(found_at: str | None, stated: str | None, now: str | None) -> bool:
-    """Whether the outcome is now "as found earlier, look again"."""
+    """Whether the outcome is now "as found earlier, look again": too old, or found in the future by a wrong clock."""
     end, at = valid_until(found_at, stated), moment(now) if now else None
-    return end is not None and at is not None and at > end
+    found = moment(found_at) if found_at else None
+    if at is None:
+        return False
+    return (end is not None and at > end) or (found is not None and found > at + timedelta(hours=1))

@@ -81,6 +81,11 @@ def _everything(record: Record) -> Iterator[tuple[str, Any, str, bool]]:
         yield from _sheet(f"/limits/{i}", sheet)
 
 
+def is_part_of_span(text: str) -> bool:
+    """Whether a sag limit is written as a part of the span: "L/360", "/360"."""
+    return text.replace(" ", "").upper().startswith(("L/", "/"))
+
+
 def _section(record: Record) -> Iterator[tuple[str, Any, str, bool]]:
     section = record["section"]
     yield "/section/depth", section["depth"], "small_length", True
@@ -103,7 +108,7 @@ def _sheet(path: str, sheet: Any) -> Iterator[tuple[str, Any, str, bool]]:
     yield f"{path}/restraint_spacing", sheet["restraint_spacing"], "length", False
     for j, entry in enumerate(sheet["entries"]):
         at = f"{path}/entries/{j}"
-        if not (entry["criterion"] == "sag" and entry["value"] and "/" in entry["value"]["text"][:2]):
+        if not (entry["criterion"] == "sag" and entry["value"] and is_part_of_span(entry["value"]["text"])):
             yield f"{at}/value", entry["value"], ENTRY_DIMENSION[entry["criterion"]], False
         yield f"{at}/width", entry["width"], "length", False
         if entry["zone"] is not None:

@@ -10,6 +10,8 @@ from pathlib import Path
 
 import pytest
 
+pytestmark = pytest.mark.cpython_only  # reads the source tree, runs commands
+
 ROOT = Path(__file__).parent.parent
 README, DEVELOPERS = (ROOT / name for name in ("README.md", "DEVELOPERS.md"))
 RULES = {f"J{n}" for n in (*range(1, 10), *range(12, 18), 19, 20, *range(22, 28))}
@@ -22,7 +24,6 @@ def commands(page: Path) -> list[str]:
     return blocks + re.findall(r"`((?:python3|\.venv/bin/python) -?[^`]*)`", text)
 
 
-@pytest.mark.cpython_only
 @pytest.mark.parametrize("page", [README, DEVELOPERS], ids=lambda p: p.name)
 def test_every_command_is_one_that_is_tried_here(page):
     """Each is run below, except what the test run itself is made of: set-up, assembly, the whole test, benches."""
@@ -34,7 +35,6 @@ def test_every_command_is_one_that_is_tried_here(page):
     assert set(commands(page)) <= known
 
 
-@pytest.mark.cpython_only
 def test_the_terminal_commands_of_the_readme_run(tmp_path):
     ran = 0
     for line in commands(README):
@@ -50,13 +50,11 @@ def test_the_terminal_commands_of_the_readme_run(tmp_path):
     assert ran == 3
 
 
-@pytest.mark.cpython_only
 def test_the_list_of_checks_is_printed():
     done = subprocess.run([sys.executable, "-m", "tools", "test", "--list"], cwd=ROOT, capture_output=True, text=True, check=True)
     assert [line.split()[0] for line in done.stdout.splitlines()] == ["lint", "types", "unit", "wasm", "js", "e2e"]
 
 
-@pytest.mark.cpython_only
 @pytest.mark.parametrize("script", ["solver.py", "start_up.py"])
 def test_the_benches_are_there_and_compile(script):
     compile((ROOT / "bench" / script).read_text("utf-8"), script, "exec")
@@ -84,21 +82,18 @@ def test_the_version_is_the_newest_of_the_changelog():
     assert f'version = "{newest[1]}"' in (ROOT / "pyproject.toml").read_text("utf-8")
 
 
-@pytest.mark.cpython_only
 def test_the_validator_is_the_schema():
     from tools.record_validator import code
 
     assert (ROOT / "pysolver" / "record_validator.py").read_text("utf-8") == code()
 
 
-@pytest.mark.cpython_only
 def test_the_first_words_of_the_page_are_those_of_python():
     from tools.first_words import code
 
     assert (ROOT / "web" / "first-words.js").read_text("utf-8") == code()
 
 
-@pytest.mark.cpython_only
 def test_no_text_names_where_this_was_made():
     """Set-up works anywhere: no path of somebody's machine stands in the project."""
     listed = subprocess.run([shutil.which("git") or "git", "ls-files"], cwd=ROOT, capture_output=True, text=True, check=False)

@@ -419,6 +419,11 @@ def test_J26_an_outcome_never_outlives_its_validity(until: str | None, now: str,
     assert "09:00" in told["as_found"]
 
 
+def test_J26_a_beam_found_in_the_future_is_never_valid() -> None:
+    """A clock is wrong; an hour is left for zones and summer time entered by hand."""
+    assert answer(run_check(simple()), "2031-05-03T09:00:00Z")["outcome"]["lapsed"]
+
+
 def test_J26_a_lapsed_outcome_never_lets_anybody_carry_on() -> None:
     told = answer(run_check(simple()), "2031-05-07T09:00:00Z")
     assert told["outcome"]["lapsed"]

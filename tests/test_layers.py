@@ -5,6 +5,8 @@ from pathlib import Path
 
 import pytest
 
+pytestmark = pytest.mark.cpython_only  # reads the source tree
+
 PACKAGE = Path(__file__).parent.parent / "pysolver"
 
 # from the bottom up: a module imports only modules named before it

@@ -486,7 +486,7 @@ export const FIRST_WORDS = {
     "edition": "EN 1990:2002+A1:2005, recommended values",
     "basis": "factored",
     "from_memory": true,
-    "help": "gamma: table A1.2(B) read in secondary copies. psi0: table A1.1 from memory (imposed A to D 0.7, storage E 1.0, roofs H 0, snow 0.7: the value above 1000 m and in the north is used everywhere, being the larger); construction loads 1.0: EN 1991-1-6 A1.1, from memory; standing water 1.0: none published, taken as the largest. National annexes may differ."
+    "help": "gamma: table A1.2(B) read in secondary copies. psi0: table A1.1 from memory (imposed A to D 0.7, storage E 1.0, roofs H 0, snow 0.7: the value above 1000 m and in the north is used everywhere, being the larger); construction loads 1.0: EN 1991-1-6 A1.1, from memory; standing water 1.0: none published, taken as the largest. Settlement 1.2, and none where it relieves: EN 1992-1-1 2.3.1.3, from memory. National annexes may differ."
    },
    {
     "id": "asce7-16-lrfd",

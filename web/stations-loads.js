@@ -46,7 +46,7 @@ function loadStation(record, i, vocabulary) {
   if (!(line && load.whole_beam)) fields.push(...positionFields(record, `${path}/position`, load.position ?? blankPosition(), make, { edges: true }));
   if (line && !load.whole_beam) fields.push(make.number(`${path}/length`, 'Length along the beam', 'length'));
   fields.push(make.yesNo(`${path}/removable`, 'Could someone take it away'), make.photo(load.id));
-  if (line) fields.push(make.number(`${path}/magnitude_end`, 'Size per length at its other end', 'line_load', { extra: true, help: 'Leave empty where it is the same all along.' }));
+  if (line) fields.push(make.number(`${path}/magnitude_end`, 'Size per length at its right end', 'line_load', { extra: true, help: 'Leave empty where it is the same all along; otherwise the size above is at its left end.' }));
   fields.push(make.text(`${path}/source`, 'Same source as', { extra: true, help: 'Loads with the same words here are one unknown: they are heavy or light together.' }));
   fields.push(make.long(`${path}/note`, 'Note on the load', { extra: true }));
   fields.push(make.action('/loads', 'Add another load', (now) => addLoad(now), { go: `/loads/${record.loads.length}` }));
