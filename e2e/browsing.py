@@ -1,12 +1,13 @@
 """What is a phone here? A Chromium with a profile on disk, touch, a narrow screen, and an ear for everything that goes wrong."""
 
+import contextlib
 import os
 import signal
 import time
 from pathlib import Path
 from urllib.parse import urlsplit
 
-from playwright.sync_api import BrowserContext, ConsoleMessage, Page, Playwright, Request, Response, expect
+from playwright.sync_api import BrowserContext, ConsoleMessage, Dialog, Error, Page, Playwright, Request, Response, expect
 
 START = 90_000  # ms: the solver's start on a busy machine of two cores
 PHONE = {"viewport": {"width": 360, "height": 740}, "is_mobile": True, "has_touch": True, "device_scale_factor": 2}
@@ -49,15 +50,19 @@ class Device:
 
     def _start(self) -> None:
         self._context = self._playwright.chromium.launch_persistent_context(
-            self.profile, executable_path=self._program, args=ARGUMENTS, timeout=60_000, locale="en-GB", timezone_id="Europe/London",
-            **(DESK if self.wide else PHONE))
+            self.profile, executable_path=self._program, args=ARGUMENTS, timeout=60_000, locale="en-GB",
+            timezone_id="Europe/London", **(DESK if self.wide else PHONE))
         self._context.set_default_timeout(30_000)
         self._context.grant_permissions(["clipboard-read", "clipboard-write"], origin=self.url)
         self._context.on("request", self._on_request)
         self._context.on("response", self._on_response)
         self._context.on("console", self._on_console)
         self._context.on("weberror", lambda error: self._heard.append(f"page error: {error.error}"))
-        self._context.on("page", lambda page: page.on("dialog", lambda box: (self._heard.append(f"dialog: {box.message}"), box.dismiss())))
+        self._context.on("dialog", self._on_dialog)
+
+    def _on_dialog(self, box: Dialog) -> None:
+        self._heard.append(f"dialog: {box.message}")
+        box.dismiss()
 
     def _on_request(self, request: Request) -> None:
         self.requested.append(request.url)
@@ -85,17 +90,15 @@ class Device:
 
     def kill(self) -> None:
         """End the browser's process at once, as an empty battery or the system would."""
-        pid = int(os.readlink(self.profile / "SingletonLock").rpartition("-")[2])
+        pid = int((self.profile / "SingletonLock").readlink().name.rpartition("-")[2])
         os.kill(pid, signal.SIGKILL)
         for _ in range(100):
             if not alive(pid):
                 break
             time.sleep(0.1)
         context, self._context = self.context, None
-        try:
+        with contextlib.suppress(Error):  # whatever it says of a browser that is gone
             context.close()
-        except Exception as error:  # what it says when the browser is gone differs between versions
-            assert "closed" in str(error).lower(), error
         for name in ("SingletonLock", "SingletonCookie", "SingletonSocket"):
             (self.profile / name).unlink(missing_ok=True)
 

@@ -1,4 +1,4 @@
-"""Does a working day lose nothing? Drafts, reloads, undo, two tabs, a decision, distress, export and import; all without a server."""
+"""Does a working day lose nothing? Drafts, reloads, undo, two tabs, distress, export and import, all without a server."""
 
 import zipfile
 from pathlib import Path

@@ -53,7 +53,8 @@ def test_below_a_sub_path_it_installs_and_opens_without_the_server(dist: Path, s
     assert all(url.startswith((server.url, "blob:", "data:")) for url in phone.requested)
 
 
-def test_a_file_that_arrives_changed_keeps_it_from_saying_ready(dist: Path, serve: Serve, device: MakeDevice, tmp_path: Path) -> None:
+def test_a_file_that_arrives_changed_keeps_it_from_saying_ready(dist: Path, serve: Serve, device: MakeDevice,
+                                                                tmp_path: Path) -> None:
     damaged = Path(shutil.copytree(dist, tmp_path / "damaged"))
     with (damaged / "css" / "print.css").open("a") as style:
         style.write("\n/* one line more on the way */\n")

@@ -1,4 +1,4 @@
-"""Can every screen be read, reached and touched, on a phone of 360 x 740 and on a desk of 1280 x 800? Pictures go to e2e/shots."""
+"""Can every screen be read, reached and touched, on a phone of 360 x 740 and on a desk of 1280 x 800? Pictures: e2e/shots."""
 
 from collections.abc import Callable
 from pathlib import Path
@@ -16,17 +16,23 @@ from pysolver.recorded import carried, short
 SHOTS = Path(__file__).parent / "shots"
 AXE = (ROOT / "tools" / "node_modules" / "axe-core" / "axe.min.js").read_text(encoding="utf-8")
 RULES = "{runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'], resultTypes: ['violations']}"
+VIOLATIONS = f"""async () => (await axe.run(document, {RULES})).violations.map((one) => [one.impact, one.id,
+  one.nodes.map((node) => `${{node.target.join(' ')}} ${{node.failureSummary}}`).slice(0, 4)])"""
 SMALLEST = 44  # CSS px: WCAG 2.2, 2.5.5 (enhanced target size)
 
 # Whatever takes a touch: for a radio or check box that is its whole label.
-TARGETS = """() => [...document.querySelectorAll('button, a[href], select, textarea, summary, label:has(input), input:not(label input)')]
+TARGETS = """() => [...document.querySelectorAll(
+    'button, a[href], select, textarea, summary, label:has(input), input:not(label input)')]
   .filter((one) => one.checkVisibility({visibilityProperty: true}) && !one.disabled && one.getClientRects().length)
-  .map((one) => ({ name: one.getAttribute('aria-label') || one.id || one.textContent.trim().slice(0, 60), box: one.getBoundingClientRect() }))
+  .map((one) => ({ name: one.getAttribute('aria-label') || one.id || one.textContent.trim().slice(0, 60),
+    box: one.getBoundingClientRect() }))
   .filter(({box}) => box.width > 0 && (box.width < MIN - 0.5 || box.height < MIN - 0.5))
   .map(({name, box}) => `${name}: ${Math.round(box.width)} x ${Math.round(box.height)}`)""".replace("MIN", str(SMALLEST))
 
-CUT_OFF = """() => [...document.querySelectorAll('button, label, p, h1, h2, h3, dd, dt, td, th, li, legend, summary, b, small, span')]
-  .filter((one) => one.checkVisibility({visibilityProperty: true, opacityProperty: true}) && one.closest('svg') === null && one.getClientRects().length)
+CUT_OFF = """() => [...document.querySelectorAll(
+    'button, label, p, h1, h2, h3, dd, dt, td, th, li, legend, summary, b, small, span')]
+  .filter((one) => one.checkVisibility({visibilityProperty: true, opacityProperty: true}))
+  .filter((one) => one.closest('svg') === null && one.getClientRects().length)
   .filter((one) => one.getBoundingClientRect().right > innerWidth + 1 && !one.closest('.drawing'))
   .map((one) => one.textContent.trim().slice(0, 60))"""
 
@@ -50,7 +56,7 @@ def faults(page: Page, name: str, *, wide: bool) -> list[str]:
     SHOTS.mkdir(exist_ok=True)
     page.screenshot(path=SHOTS / f"{'desk' if wide else 'phone'}-{name}.png")
     page.evaluate(AXE)
-    found = page.evaluate(f"async () => (await axe.run(document, {RULES})).violations.map((one) => [one.impact, one.id, one.nodes.map((n) => n.target.join(' ') + ' ' + n.failureSummary).slice(0, 4)])")
+    found = page.evaluate(VIOLATIONS)
     wrong = [f"axe {impact}: {rule} {nodes}" for impact, rule, nodes in found if impact in ("serious", "critical")]
     width = page.evaluate("innerWidth")
     if width != (1280 if wide else 360):

@@ -11,7 +11,8 @@ from pysolver.record import Record, blank
 
 SPANS = (("A–B", "3.80"), ("B–C", "4.60"), ("C–D", "3.80"))
 BEARINGS = (("A", "100"), ("B", "200"), ("C", "200"), ("D", "100"))
-LIMITS = (("sagging moment", "sagging", "26", "kN·m"), ("hogging moment", "hogging", "30", "kN·m"), ("shear", "shear", "45", "kN"))
+LIMITS = (("sagging moment", "sagging", "26", "kN·m"), ("hogging moment", "hogging", "30", "kN·m"),
+          ("shear", "shear", "45", "kN"))
 EN = "EN 1990, expression 6.10, STR set B, EN 1990:2002+A1:2005, recommended values"
 SEEN = "None of these seen"
 

@@ -13,7 +13,7 @@ from pysolver.answer import answer, versions
 from pysolver.beam import Beam, Stretch, Support
 from pysolver.check import run_check
 from pysolver.demo import demo
-from pysolver.display import also, field_units, show
+from pysolver.display import System, also, field_units, show
 from pysolver.errors import InputError, InternalError
 from pysolver.json_text import loads
 from pysolver.link import decode, encode
@@ -26,6 +26,7 @@ from pysolver.units import parse
 from pysolver.vocabulary import words
 
 MAX_REQUEST = 4_000_000  # characters
+STEPS = {"metric": ("-500 mm", "-100 mm", "-10 mm", "10 mm", "100 mm", "500 mm"), "us": ("-12 in", "-1 in", "1 in", "12 in")}
 QR_LONGEST = 1000  # characters of a link that a phone's camera still reads from a phone's screen
 
 
@@ -57,7 +58,7 @@ def hello(request: dict[str, Any]) -> dict[str, Any]:
     """Words, units, an empty record and versions: all that the page needs to offer its fields."""
     lists = words()
     return {"versions": versions(), "vocabulary": lists, "units": {s: field_units(s) for s in ("metric", "us")},
-            "blank": blank(), "cautions": lists["cautions"], "not_compared": lists["not_compared"],
+            "steps": STEPS, "blank": blank(), "cautions": lists["cautions"], "not_compared": lists["not_compared"],
             "limits_of_tool": lists["limits_of_tool"]}
 
 
@@ -86,6 +87,19 @@ def read(request: dict[str, Any]) -> dict[str, Any]:
             "also": also(dimension, parsed.value, system) if dimension != "number" else ""}
 
 
+def step(request: dict[str, Any]) -> dict[str, Any]:
+    """A distance moved by one of STEPS, as the text that stands in the field then."""
+    system: System = "us" if request.get("system") == "us" else "metric"
+    if request["by"] not in STEPS[system]:
+        raise InternalError(code="call", message="The page asked for a step that there is none of.")
+    here = parse("length", str(request["text"])[:80], str(request.get("unit") or "")).value if request["text"] else 0.0
+    there = here + parse("small_length", request["by"]).value
+    if there < 0.0:
+        raise InputError(code="negative", message=f"{request['by']} from there would be behind the point that it is measured "
+                         "from. Measure from the other side of it.")
+    return {"text": show("length", there, system)}
+
+
 def check(request: dict[str, Any]) -> dict[str, Any]:
     """The check of a record; stage "best" comes first and fast, "full" with the ranges."""
     return answer(run_check(request["record"], full=request.get("stage") != "best"), request.get("now"))
@@ -109,7 +123,8 @@ def file(request: dict[str, Any]) -> dict[str, Any]:
 
 
 CALLS: dict[str, Callable[[dict[str, Any]], dict[str, Any]]] = {
-    "hello": hello, "self_check": self_check, "demo": lambda request: {"record": demo()}, "read": read, "check": check,
+    "hello": hello, "self_check": self_check, "demo": lambda request: {"record": demo()}, "read": read, "step": step,
+    "check": check,
     "link": link, "open": open_, "file": file}
 
 
@@ -120,6 +135,7 @@ def examples() -> list[str]:
     asked: list[dict[str, Any]] = [
         {"call": "hello"}, {"call": "self_check"}, {"call": "demo"},
         {"call": "read", "dimension": "length", "text": "18' 4 1/2\"", "unit": "m"},
+        {"call": "step", "text": "2.3", "unit": "m", "by": "-10 mm"},
         {"call": "check", "record": record, "stage": "best"}, {"call": "check", "record": record, "stage": "full"},
         {"call": "link", "record": record, "app_url": "https://example.invalid/"}, {"call": "open", "fragment": fragment},
         {"call": "file", "record": record}, {"call": "check", "record": blank(), "stage": "full"}]

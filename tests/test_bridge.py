@@ -224,3 +224,15 @@ def test_drawings_carry_no_words_of_strangers_unescaped() -> None:
     record["supports"][0]["name"] = hostile[:40]
     result = asked({"call": "check", "record": record})["result"]
     assert not any("<script" in svg for svg in texts(result.get("drawings", {})))
+
+
+@pytest.mark.parametrize(("asked_for", "text"), [
+    ({"text": "2.3", "unit": "m", "by": "-10 mm"}, "2.29 m"), ({"text": "", "unit": "m", "by": "500 mm"}, "0.50 m"),
+    ({"text": "1 m", "unit": "m", "by": "-500 mm"}, "0.50 m"), ({"text": "7' 11\"", "by": "1 in", "system": "us"}, "8' 0\""),
+])
+def test_a_distance_moves_by_the_step_that_was_pressed(asked_for: dict[str, str], text: str) -> None:
+    assert asked({"call": "step", **asked_for})["result"]["text"] == text
+
+
+def test_a_step_never_goes_behind_the_point_measured_from() -> None:
+    assert asked({"call": "step", "text": "5 mm", "unit": "m", "by": "-10 mm"})["error"]["code"] == "negative"

@@ -19,9 +19,9 @@ def code() -> str:
     from pysolver.bridge import handle  # only here: tools/ itself runs before anything is installed
 
     said = json.loads(handle('{"call": "hello"}'))["result"]
-    kept = {name: said[name] for name in ("vocabulary", "units")}
-    lists = {name: value for name, value in kept["vocabulary"].items() if name not in ("cautions", "not_compared", "limits_of_tool")}
-    return HEADER + json.dumps({"vocabulary": lists, "units": kept["units"]}, indent=1, ensure_ascii=False) + ";\n"
+    later = ("cautions", "not_compared", "limits_of_tool")  # shown with a result, which there is none of yet
+    lists = {name: value for name, value in said["vocabulary"].items() if name not in later}
+    return HEADER + json.dumps({"vocabulary": lists, "units": said["units"], "steps": said["steps"]}, indent=1, ensure_ascii=False) + ";\n"
 
 
 if __name__ == "__main__":

@@ -74,6 +74,15 @@ export function createEditing({ state, storage, ask, check, fail }) {
   /** @param {Field} field @returns {Draft} */
   const draftNow = (field) => state.drafts.value[field.path] ?? draftOf(getAt(state.record.value, field.path), printedUnit(field));
 
+  /** Move a distance by a step; Python adds. @param {Field} field @param {string} by */
+  async function step(field, by) {
+    const { text, unit } = draftNow(field);
+    const system = state.record.value?.settings.display === 'us' ? 'us' : 'metric';
+    try { type(field, { text: (await ask('step', { text, unit: unit || printedUnit(field), by, system })).text }); } catch (error) {
+      state.reading.value = { path: field.path, text, error: /** @type {any} */ (error).userMessage ?? String(error) };
+    }
+  }
+
   /** @param {Field} field @param {Partial<Draft>} patch */
   function type(field, patch) {
     setDraft(field.path, { ...draftNow(field), ...patch });
@@ -184,6 +193,6 @@ export function createEditing({ state, storage, ask, check, fail }) {
   /** @param {string} name who was told to clear the area */
   const told = (name) => commit((record) => setAt(record, '/condition/told', { name, time: isoWithZone(new Date()) }), 'Who was told', { keepDecision: true });
 
-  return { commit, setDraft, type, read, enter, choose, chooseMeans, answer, mark, act, undo, addPhoto, removePhoto, decide, told, printedUnit, draftNow, settled: () => queue };
+  return { commit, setDraft, type, step, read, enter, choose, chooseMeans, answer, mark, act, undo, addPhoto, removePhoto, decide, told, printedUnit, draftNow, settled: () => queue };
 }
 /** @typedef {ReturnType<typeof createEditing>} Editing */

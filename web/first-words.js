@@ -814,5 +814,21 @@ export const FIRST_WORDS = {
     "keys": []
    }
   }
+ },
+ "steps": {
+  "metric": [
+   "-500 mm",
+   "-100 mm",
+   "-10 mm",
+   "10 mm",
+   "100 mm",
+   "500 mm"
+  ],
+  "us": [
+   "-12 in",
+   "-1 in",
+   "1 in",
+   "12 in"
+  ]
  }
 };

@@ -42,6 +42,7 @@
  * @typedef {object} Hello
  * @property {Vocabulary} vocabulary
  * @property {Record<string, Record<string, {unit:string, keys:string[]}>>} units
+ * @property {Record<string, string[]>} steps by which a distance can be moved
  * @property {any} [blank]
  * @property {Record<string,string>} [versions]
  * @property {string[]} [cautions]

@@ -25,7 +25,7 @@ HEADER = importlib.util.MAGIC_NUMBER + (1).to_bytes(4, "little") + bytes(8)
 LEFT_OUT = re.compile(
     r"(unittest|_pyrepl|multiprocessing|xmlrpc|wsgiref|sqlite3|mailbox|imaplib|poplib|smtplib|ftplib|pdb|doctest|pydoc"
     r"|_sysconfigdata|cProfile|profile|pstats|trace\.|tabnanny|pyclbr|pickletools|optparse|webbrowser|antigravity|this\."
-    r"|socketserver|xml/(?!__init__|sax)|ctypes/macholib|concurrent/interpreters|__phello|http/server|http/cookiejar|logging/handlers"
+    r"|socketserver|xml/|ctypes/macholib|concurrent/interpreters|__phello|http/server|http/cookiejar|logging/handlers"
     r"|logging/config|asyncio/windows|asyncio/proactor|asyncio/__main__|tomllib|configparser|netrc|plistlib"
     r"|nturl2path|mimetypes|getopt|cmd\.|code\.|bdb|rlcompleter|sched|shelve|pty|tty|symtable|timeit|tracemalloc|zipapp"
     r"|compileall|py_compile|modulefinder|filecmp|fileinput)"

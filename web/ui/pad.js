@@ -39,12 +39,14 @@ function Pad({ controller, field }) {
     const next = typed(text, input()?.selectionStart ?? text.length, input()?.selectionEnd ?? text.length, key);
     write(next.text, next.caret);
   };
+  const steps = part === 'text' && /\/position\/distance$/.test(field.path) && state.solver.value.state === 'ready' ? state.words.value.steps[display] ?? [] : [];
   const unit = (/** @type {string} */ name) => { const text = withUnit(present(), name, units); write(text, text.length); };
   // The field keeps the focus while keys are pressed.
   const hold = (/** @type {Event} */ event) => event.preventDefault();
   const done = () => { state.padUp.value = false; input()?.blur(); state.focus.value = null; };
   return html`<div class="pad" onMouseDown=${hold}>
     <div class="pad-units" role="group" aria-label="Units">${units.map((name) => html`<button key=${name} class="pad-key pad-unit" aria-label=${`Unit ${name}`} onClick=${() => unit(name)}>${name}</button>`)}</div>
+    ${steps.length > 0 && html`<div class="pad-units pad-steps" role="group" aria-label="Move it">${steps.map((by) => html`<button key=${by} class="pad-key" aria-label=${`Move by ${by}`} onClick=${() => { void editing.step(field, by); }}>${by.startsWith('-') ? by.replace('-', '−') : `+${by}`}</button>`)}</div>`}
     <div class="pad-grid"><div class="pad-figures">${ROWS.flat().map((key) => html`<button key=${key} class=${/\d/.test(key) ? 'pad-key' : 'pad-key pad-sign'} aria-label=${NAMES[key] ?? key} onClick=${() => press(key)}>${key === ' ' ? '␣' : key}</button>`)}</div>
       <div class="pad-side"><button class="pad-key pad-sign" aria-label="Backspace" onClick=${() => press('Backspace')}>⌫</button>
         <button class="pad-key pad-sign pad-close" aria-label="Close the pad" onClick=${done}>Close</button>
