@@ -10,6 +10,7 @@ from pictures import write_picture
 from playwright.sync_api import Page, expect
 from steps import Person, demonstration, judged, link_text, new_check
 
+MOMENT = 1000  # ms between the last touch and the end of the page or the browser
 SIZE = "Load 2, size per length"
 TYPING = "Outcome: typing: result is for the earlier values"
 
@@ -26,7 +27,7 @@ def test_a_lintel_with_a_load_as_its_limit_is_judged_for_its_simple_span(phone: 
     for support in ("A", "B"):
         person.go_to(f"Support {support}")
         person.choose(f"Support {support}, kind", "Bearing")
-        person.enter(f"Support {support}, bearing length", "150", "steel tape")
+        person.enter(f"Support {support}, bearing length", "140", "steel tape")
     person.go_to("Span A–B")
     person.choose("Span A–B, measured how", "Clear, face to face")
     person.enter("Span A–B, clear opening", "1.50", "laser distance meter")
@@ -44,7 +45,7 @@ def test_a_lintel_with_a_load_as_its_limit_is_judged_for_its_simple_span(phone: 
     person.press("Limits 1, add load per length")
     person.enter("Limits 1, load per length", "15")
     person.close_pad()
-    person.enter("Limits 1, span it was issued for", "1.65")
+    person.enter("Limits 1, span it was issued for", "1.64")
     person.close_pad()
     person.choose("Limits 1, span counted as", "Centre to centre of bearings")
     person.choose("Limits 1, restraint it was issued for", "Held sideways all along, or cannot buckle")
@@ -97,7 +98,7 @@ def test_a_half_typed_number_never_shows_an_outcome_of_its_own(phone: Device) ->
     before = title(page)
     person.go_to("Load 2: pack of paving")
     person.tap(page.get_by_role("textbox", name=SIZE, exact=True))
-    for sign in ("1", "9", "9", "0", "Unit kN/m"):  # the first key takes the place of the entered number
+    for sign in ("2", "2", "Unit kN/m"):  # the first key takes the place of the entered number
         person.key(sign)
         expect(page.get_by_role("button", name=TYPING)).to_be_visible()
         expect(person.bar()).to_have_class("outcome-bar is-close is-typing")
@@ -107,7 +108,7 @@ def test_a_half_typed_number_never_shows_an_outcome_of_its_own(phone: Device) ->
     expect(page.get_by_text("typing: this result is for the earlier values")).to_be_visible()
     assert title(page) == before
     person.go_to("Load 2: pack of paving")
-    expect(page.get_by_role("textbox", name=SIZE, exact=True)).to_have_value("1990 kN/m")
+    expect(page.get_by_role("textbox", name=SIZE, exact=True)).to_have_value("22 kN/m")
     person.press(f"Enter, {SIZE}")
     expect(page.get_by_role("button", name=TYPING)).to_have_count(0)
     person.result()
@@ -155,6 +156,7 @@ def test_drafts_and_answers_outlive_a_reload_and_the_end_of_the_browser(phone: D
     person.go_to("Span A–B")
     person.choose("Span A–B, measured how", "Clear, face to face")
     person.type_number("Span A–B, clear opening", "4.3")
+    person.page.wait_for_timeout(MOMENT)
     person.page.reload()
     field = person.page.get_by_role("textbox", name="Span A–B, clear opening", exact=True)
     expect(field).to_have_value("4.3")

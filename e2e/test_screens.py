@@ -145,14 +145,14 @@ def stations(page: Page, person: Person, look: Callable[[str], None]) -> None:
     person.type_number("Overhangs, beyond A", "0.4")
     person.key("Next")
     look("34-pad-how-known")
+    person.choose("Overhangs, beyond A, how known", "steel tape")
+    expect(person.pad().get_by_role("textbox", name="Overhangs, beyond C", exact=True)).to_be_visible()
+    person.close_pad()
 
 
 def share_and_list(page: Page, person: Person, look: Callable[[str], None]) -> None:
     """Sharing, the list with a check, distress."""
     if person.touch:
-        if person.pad().count():
-            person.choose("Overhangs, beyond A, how known", "steel tape")
-            person.close_pad()
         person.press("All fields")
         look("40-all-fields")
         person.press("All fields")

@@ -99,13 +99,13 @@ def _decision_label(choice: str) -> str:
 
 
 def bar_numbers(leading: Compared | None) -> str:
-    """Second line of the bar: what governs, where, its ratio and how far it may range."""
+    """Second line of the bar, as short as it can be read: what governs, where, its ratio, and that of the worst case."""
     if leading is None or leading.ratio is None:
         return "No ratio to a limit can be given yet."
-    text = f"{leading.title}, {leading.place}: {show_ratio(leading.ratio)}"
-    if leading.high is not None and leading.low is not None:
-        text += f" ({show_ratio(leading.low)} to {show_ratio(leading.high)})"
-    return text
+    title = leading.title.removeprefix("Bending, ")
+    place, spanned, span = leading.place.partition(", span ")
+    text = f"{title[:1].upper()}{title[1:]}, {place}{f' ({span})' * bool(spanned)}: {show_ratio(leading.ratio)}"
+    return text if leading.high is None else f"{text}, worst {show_ratio(leading.high)}"
 
 
 def by_weight(compared: Sequence[Compared]) -> list[Compared]:

@@ -95,15 +95,15 @@ def label_values(figure: Figure, layout: Layout, pieces: Sequence[Piece], edges:
     """All texts in the plot. edges: curves of the worst case; floor: magnitudes up to it are rounding residues."""
     sheet = Sheet(frame=Box(x0=1, y0=figure.top - 6, x1=WIDTH - 1, y1=figure.bottom + 1))
     sheet.soft += [*_lines(figure, pieces), *(box for edge in edges for box in _lines(figure, edge)),
-                   *_rail_boxes(figure, rails), Box(x0=0, x1=WIDTH, y0=figure.base - 1, y1=figure.base + 9)]
-    sheet.hard += [Box(x0=x - RING, x1=x + RING, y0=y - RING, y1=y + RING)
-                   for x, y in ((figure.x(place), figure.y(value)) for place, value, _ in governing)]
+                   Box(x0=0, x1=WIDTH, y0=figure.base - 1, y1=figure.base + 9)]
+    sheet.hard += [*_rail_boxes(figure, rails), *(Box(x0=x - RING, x1=x + RING, y0=y - RING, y1=y + RING)
+                   for x, y in ((figure.x(place), figure.y(value)) for place, value, _ in governing))]
     must = [(text, sheet.write(text, list(_around(figure, x, value, text, RING)), "label gov"))
             for x, value, text in ((x, value, svg.clean(text, LONGEST)) for x, value, text in governing)]
     must += [(text, sheet.write(text, list(_beside(figure, start, end, value, text)), "rail-label", svg.SMALL))
              for start, end, value, text in ((a, b, value, svg.clean(text, LONGEST)) for a, b, value, text in rails)]
     values = extremes(layout, pieces, floor)
-    may = [sheet.write(figure.shown(value), list(_around(figure, x, value, figure.shown(value))),
+    may = [sheet.write(figure.shown(value), [*_around(figure, x, value, figure.shown(value)), *_afield(figure, x, value)],
                        most=MOST_COVERED if k else math.inf) for k, (x, value) in enumerate(values)]
     words = "; ".join(f"{show(figure.dimension, v, figure.system)} at {show('length', x, figure.system)}"
                       for x, v in values)
@@ -168,12 +168,21 @@ def _around(figure: Figure, x: float, value: float, words: str, clear: float = 0
         yield Place(x=px + 5, y=py - out * (6 + back), anchor="start" if out > 0 else "end", turned=True)
 
 
+def _afield(figure: Figure, x: float, value: float) -> Iterator[Place]:
+    """Places all round, farther and farther, each with a leader to the value."""
+    to = figure.x(x), figure.y(value)
+    for far in (22.0, 32.0, 44.0):
+        for k in (2, 14, 6, 10, 3, 13, 5, 11, 1, 15, 7, 9):  # sixteenths of a turn, steep ones last
+            turn = math.tau * k / 16
+            yield Place(x=to[0] + 1.3 * far * math.cos(turn), y=to[1] - far * math.sin(turn) + 4, to=to)
+
+
 def _beside(figure: Figure, start: float, end: float, value: float, words: str) -> Iterator[Place]:
     """Places for the text of a rail: outside it at its right end, its left end, its middle, then inside."""
     x0, x1, y = figure.x(start), figure.x(end), figure.y(value)
     out = 1.0 if y >= figure.base else -1.0
     half = width_of(words, svg.SMALL) / 2 + 3
-    for level in (y + (17 if out > 0 else -8), y - out * 6 + (0 if out > 0 else 9)):
+    for level in (y + (17 if out > 0 else -10), y - out * 6 + (0 if out > 0 else 9)):
         for middle in (x1 - half, x0 + half, 0.5 * (x0 + x1)):
             yield Place(x=min(max(middle, half), WIDTH - half), y=level)
 

@@ -19,6 +19,7 @@ from pysolver.comparison import Along, from_chord
 from pysolver.display import System, show
 from pysolver.drawing_body import WIDTH, TrueScale
 from pysolver.drawing_curve_labels import NAME_ROW, Figure, base_line, label_values, name_rows, peaks
+from pysolver.drawing_symbols import LEAST, WORST, key, key_rows, rings
 from pysolver.found import Layout
 from pysolver.piecewise import Floats
 from pysolver.record import SUPPORT_NAMES
@@ -28,16 +29,18 @@ Quantity = Literal["shear", "moment", "sag"]
 Piece = tuple[float, float, Floats]  # start, end (m), coefficients ascending in x - start
 
 TALL = 190.0  # of the plot
-HEADING = 46.0
-AIR = 22.0  # over and under the plot, for values and names
+HEADING = 42.0
+AIR = 21.0  # over the plot, for values
+UNDER = 22.0  # under the plot, for values and the text of a rail
 RESIDUE = 1e-9
+SHORTEST = 1e-9  # m, of a part of a curve
 NO_FORCE = 1e-6  # N, N·m
 FAR = 3.0  # a rail farther out than this many times the curve is named, not drawn
 DOWN = {"shear": -1.0, "moment": 1.0, "sag": 1.0}  # the way of positive values on the paper (y runs down)
 DIMENSION = {"shear": "force", "moment": "moment", "sag": "small_length"}
 HEADINGS = {"shear": ("Shear", "+ : left part pushed up, drawn above the line"),
             "moment": ("Moment", "sagging drawn below the line (side in tension)"),
-            "sag": ("Sag", "down drawn below the line, from the line between supports")}
+            "sag": ("Sag", "measured down from the line through the supports")}
 NAUGHT = {"shear": "no shear", "moment": "no moment", "sag": "no sag"}
 
 
@@ -70,25 +73,43 @@ def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Seque
     chord, for sag). names: of the supports of the record, in order.
     """
     pieces = best_pieces(quantity, response, layout)
-    edges = [sorted(one, key=lambda p: p[0]) for one in (high, low) if one]
     floor = residue(quantity, response, layout)
+    sides = [_sides(one, sign, floor) for one, sign in ((high, 1.0), (low, -1.0)) if one]
+    edges = [edge for side in sides for edge in side if edge]
     reach = _reach([*pieces, *(p for edge in edges for p in edge)], governing, floor)
     near, far = _drawn_rails(rails, max(abs(r) for r in reach))
     figure = _figure(quantity, layout, reach, near, system)
     labels = label_values(figure, layout, pieces, edges, [(r.start, r.end, r.sign * r.value, r.label) for r in near],
                           [(m.x, m.value, m.label) for m in governing], floor)
-    flat = not any(_reach(pieces, (), floor))
-    notes = [*_notes(quantity, bool(edges), flat), *labels.homeless, *_beyond(far), *_left_out(labels.left_out)]
     parts = [*_heading(quantity, figure.unit), *_wash_and_ordinates(figure, pieces),
-             *(_worst(figure, edge) for edge in edges), *(_rail(figure, one) for one in near),
-             base_line(figure, layout, names), _best(figure, pieces), *(_ring(figure, one) for one in governing),
-             labels.markup]
-    foot = figure.bottom + 30.0 + NAME_ROW * max(name_rows(figure, layout, names))
-    parts += [svg.text(10, foot + 14 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL)
-              for k, note in enumerate(notes)]
-    return svg.document(WIDTH, foot + 14 * len(notes) + 8, parts, name=quantity,
+             *(_least(figure, least) for _, least in sides if least),
+             *(_worst(figure, worst) for worst, _ in sides if worst), *(_rail(figure, one) for one in near),
+             base_line(figure, layout, names), _best(figure, pieces),
+             *(ring for one in governing for ring in rings(figure.x(one.x), figure.y(one.value))), labels.markup]
+    flat = "" if any(_reach(pieces, (), floor)) else f"{NAUGHT[quantity]} under these loads"
+    drawn_key, foot = key(key_rows(flat=flat, worst=any(worst for worst, _ in sides), railed=bool(near),
+                             least=any(least for _, least in sides)),
+                    figure.bottom + 26.0 + NAME_ROW * max(name_rows(figure, layout, names)), ring=bool(governing))
+    notes = [*labels.homeless, *_beyond(far), *_left_out(labels.left_out)]
+    parts += drawn_key + [svg.text(10, foot + 15 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL)
+                    for k, note in enumerate(notes)]
+    return svg.document(WIDTH, foot + 15 * len(notes) + 8, parts, name=quantity,
                         title=f"{HEADINGS[quantity][0]} along the beam",
                         description=f"{HEADINGS[quantity][1]}. {labels.words} {' '.join(r.label + '.' for r in rails)}")
+
+
+def _sides(pieces: Sequence[Piece], sign: float, floor: float) -> tuple[list[Piece], list[Piece]]:
+    """The worst case on the side of its own limit, which must stay inside the rail, and on the other side, where the
+    same line is only the least effect. Cut where the polynomials change sign; up to the floor counts as the other."""
+    sides: tuple[list[Piece], list[Piece]] = [], []
+    for start, end, c in sorted(pieces, key=lambda piece: piece[0]):
+        inner = piecewise.zeros(c, np.asarray(end - start))
+        cuts = [0.0, *np.sort(inner[~np.isnan(inner)]).tolist(), end - start]
+        for a, b in pairwise(cuts):
+            if b - a > SHORTEST:
+                middle = float(piecewise.evaluate(c, np.asarray(0.5 * (a + b))))
+                sides[sign * middle <= floor].append((start + a, start + b, piecewise.shifted(c, np.asarray(a))))
+    return sides
 
 
 def residue(quantity: Quantity, response: Response, layout: Layout) -> float:
@@ -138,7 +159,7 @@ def _figure(quantity: Quantity, layout: Layout, reach: tuple[float, float], rail
     flat = not down - up
     scale = (0.0 if flat else TALL / size) * DOWN[quantity]
     base = HEADING + AIR + (40.0 if flat else -up / size * TALL)
-    bottom = HEADING + AIR + (80.0 if flat else TALL) + AIR
+    bottom = HEADING + AIR + (80.0 if flat else TALL) + UNDER
     unit = show(DIMENSION[quantity], max(abs(v) for v in values) or 1e4, system).rpartition(" ")[2]
     return Figure(across=TrueScale(layout.beam.length), base=base, scale=scale, top=HEADING, bottom=bottom, unit=unit,
                   dimension=DIMENSION[quantity], system=system)
@@ -173,8 +194,13 @@ def _best(figure: Figure, pieces: Sequence[Piece]) -> str:
 
 
 def _worst(figure: Figure, pieces: Sequence[Piece]) -> str:
+    data = bezier.path_data(_curves(figure, pieces), figure.x, figure.y, base=figure.base)
+    return svg.path(data, "curve-high", fill="none", stroke_width=WORST[0], stroke_dasharray=WORST[1])
+
+
+def _least(figure: Figure, pieces: Sequence[Piece]) -> str:
     data = bezier.path_data(_curves(figure, pieces), figure.x, figure.y)
-    return svg.path(data, "curve-high", fill="none", stroke_width="1.6", stroke_dasharray="7 4")
+    return svg.path(data, "curve-least", fill="none", stroke_width=LEAST[0], stroke_dasharray=LEAST[1])
 
 
 def _rail(figure: Figure, rail: Rail) -> str:
@@ -187,21 +213,10 @@ def _rail(figure: Figure, rail: Rail) -> str:
     return svg.line(x0, y, x1, y, "rail", stroke_width="2.4") + svg.path(ticks, "hatch", stroke_width="0.8")
 
 
-def _ring(figure: Figure, mark: Mark) -> str:
-    x, y = figure.x(mark.x), figure.y(mark.value)
-    return "".join(svg.circle(x, y, radius, "gov", stroke_width="1.4", fill="none") for radius in (4, 8))
-
-
 def _heading(quantity: Quantity, unit: str) -> list[str]:
     title, sign = HEADINGS[quantity]
     return [svg.text(10, 18, f"{title}, {unit}", "name", anchor="start", size=svg.TITLE),
             svg.text(10, 34, sign, "label-small", anchor="start", size=svg.SMALL)]
-
-
-def _notes(quantity: Quantity, worst: bool, flat: bool) -> list[str]:
-    if flat:
-        return [f"{NAUGHT[quantity]} under these loads" + ("; dashed: worst case" if worst else "")]
-    return ["full line: best estimate, unfactored" + ("; dashed: worst case" if worst else "")]
 
 
 def _beyond(rails: Sequence[Rail]) -> list[str]:

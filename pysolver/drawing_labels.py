@@ -68,7 +68,7 @@ class Sheet:
         soft = np.array([(b.x0, b.y0, b.x1, b.y1) for b in self.soft]).reshape(-1, 4)
         for place in places:
             box = box_of(words, place, size)
-            if not self._inside(box) or any(box.meets(other) for other in self.hard):
+            if not self._inside(box) or any(box.meets(other) for other in self.hard) or self._leads_across(box, place.to):
                 continue
             covered = int(((box.x0 < soft[:, 2]) & (soft[:, 0] < box.x1) & (box.y0 < soft[:, 3])
                            & (soft[:, 1] < box.y1)).sum())
@@ -89,14 +89,29 @@ class Sheet:
         written = svg.text(place.x, place.y, words, classes, anchor=place.anchor, size=size, turned=place.turned)
         return written if place.to is None else _leader(box, place.to) + written
 
+    def _leads_across(self, box: Box, to: svg.Point | None) -> bool:
+        """Whether the leader would run through another text, a rail or a mark."""
+        if to is None:
+            return False
+        start = _leader_start(box, to)
+        steps = [k / 12 for k in range(1, 12)]
+        spots = [(start[0] + t * (to[0] - start[0]), start[1] + t * (to[1] - start[1])) for t in steps]
+        return any(one.x0 <= x <= one.x1 and one.y0 <= y <= one.y1 for one in self.hard for x, y in spots)
+
     def _inside(self, box: Box) -> bool:
         return (box.x0 >= self.frame.x0 and box.x1 <= self.frame.x1 and box.y0 >= self.frame.y0
                 and box.y1 <= self.frame.y1)
 
 
+def _leader_start(box: Box, to: svg.Point) -> svg.Point:
+    """Of the label's edge the point that is nearest to what it tells."""
+    if box.x0 - GAP <= to[0] <= box.x1 + GAP:
+        return 0.5 * (box.x0 + box.x1), box.y0 if abs(to[1] - box.y0) < abs(to[1] - box.y1) else box.y1
+    return box.x0 if to[0] < box.x0 else box.x1, min(max(to[1], box.y0), box.y1)
+
+
 def _leader(box: Box, to: svg.Point) -> str:
-    edge = box.y0 if abs(to[1] - box.y0) < abs(to[1] - box.y1) else box.y1
-    return svg.line(0.5 * (box.x0 + box.x1), edge, *to, "ordinate", stroke_width="0.6")
+    return svg.line(*_leader_start(box, to), *to, "leader", stroke_width="0.6")
 
 
 def rows(extents: Sequence[tuple[float, float]]) -> list[int]:

@@ -1,6 +1,6 @@
-"""How are supports, arrows, moments and dimensions drawn? Ink symbols of the drawing office, told apart by shape alone.
+"""How are supports, arrows, moments and dimensions drawn, and which key explains the lines of a curve?
 
-Viewbox units, y down. (x, y) of a support is the place where the underside of the beam rests on it.
+Ink symbols of the drawing office, told apart by shape alone. Viewbox units, y down. (x, y) of a support is the place where the underside of the beam rests on it.
 """
 
 import math
@@ -13,6 +13,14 @@ WALL = 15.0  # depth of the hatched wall
 PLATE = 4.0
 BEAM = 5.0  # depth of the bar
 RING = 5.0  # radius of a hinge
+KEY_LINE = 15.0  # from one row of the key to the next
+SAMPLE = 26.0  # length of a sample
+LEFT = 10.0
+WORDS = LEFT + SAMPLE + 8
+RING_AT = 236.0  # the ring shares the row of the best estimate
+WORST, LEAST = ("1.8", "7 4"), ("1", "1 4")  # stroke width and dashes
+
+KeyRow = tuple[str, str]  # class of a line of the key ("" for a row of words only), words
 
 
 def support(kind: str | None, x: float, y: float, *, side: int = 0, rotational: bool = False) -> str:
@@ -156,3 +164,36 @@ def cross_section(x: float, y: float) -> str:
     """The section turned into the paper under the beam: the place to touch for the member itself."""
     outline: list[Point] = [(x - 5, y), (x + 5, y), (x + 5, y + 18), (x - 5, y + 18)]
     return hatched(x - 5, y, 10, 18, 4) + polyline(outline, "ground", closed=True, stroke_width="1.2")
+
+
+def key_rows(*, flat: str, worst: bool, least: bool, railed: bool) -> list[KeyRow]:
+    """flat: the words of a curve that is nowhere different from zero, else empty. worst, least, railed: what is drawn."""
+    rows = [("", flat)] if flat else [("curve", "best estimate, unfactored")]
+    if worst:
+        rows.append(("curve-high", "worst case, with the factors of the limit" + ":" * railed))
+        rows += [("", "the line to be kept inside the rails")] if railed else []
+    return [*rows, ("curve-least", "least effect: only to look at")] if least else rows
+
+
+def key(rows: Sequence[KeyRow], top: float, *, ring: bool) -> tuple[list[str], float]:
+    """Markup, and the ordinate below it. ring: also the mark of a governing place, best estimate with factors."""
+    parts = []
+    for k, (kind, words) in enumerate(rows):
+        y = top + KEY_LINE * (k + 1)
+        bare = not kind and k == 0
+        parts += [_sample(kind, y - 4)] if kind else []
+        parts.append(text(LEFT if bare else WORDS, y, words, "label-small", anchor="start", size=SMALL))
+    if ring:
+        parts += [*rings(RING_AT, top + KEY_LINE - 4, (3, 6)),
+                  text(RING_AT + 12, top + KEY_LINE, "factored", "label-small", anchor="start", size=SMALL)]
+    return parts, top + KEY_LINE * len(rows)
+
+
+def rings(x: float, y: float, radii: Sequence[float] = (4, 8)) -> list[str]:
+    return [circle(x, y, radius, "gov", stroke_width="1.4", fill="none") for radius in radii]
+
+
+def _sample(kind: str, y: float) -> str:
+    dashes = {"curve-high": WORST, "curve-least": LEAST}.get(kind)
+    extra = {"stroke_width": "2"} if dashes is None else {"stroke_width": dashes[0], "stroke_dasharray": dashes[1]}
+    return line(LEFT, y, LEFT + SAMPLE, y, kind, **extra)

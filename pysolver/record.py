@@ -9,10 +9,8 @@ from collections.abc import Iterator
 from datetime import UTC, datetime
 from typing import Any
 
-from fastjsonschema import JsonSchemaValueException
-
 from pysolver.errors import InputError
-from pysolver.record_validator import validate
+from pysolver.record_validator import JsonSchemaValueException, validate
 
 Record = dict[str, Any]
 

@@ -1,9 +1,17 @@
-"""Generated from record.schema.json by tools/record_validator.py. Do not edit."""
+"""Generated from record.schema.json by fastjsonschema and tools/record_validator.py. Do not edit."""
+
+
+class JsonSchemaValueException(ValueError):
+    """What a document breaks; here so that fastjsonschema itself need not travel to a phone."""
+
+    def __init__(self, message):
+        super().__init__(message)
+        self.message = message
+
 
 VERSION = "2.22.3"
 from decimal import Decimal
 import re
-from fastjsonschema import JsonSchemaValueException, JsonSchemaValuesException
 
 
 REGEX_PATTERNS = {

@@ -15,8 +15,9 @@ SCRIPTS = TOOLS / "pyodide"
 STANDARD_LIBRARY = BUILD / "archives" / "python-standard-library.zip"
 APPLICATION = BUILD / "archives" / "application"
 PYODIDE_PARTS = ("pyodide.mjs", "pyodide.asm.mjs", "pyodide.asm.wasm")
-# Pure-Python packages that pysolver needs when it runs.
-RUN_TIME_WHEELS = {"fastjsonschema"}
+# Pure-Python packages that pysolver needs when it runs: none; and those whose output it carries, for the notices.
+RUN_TIME_WHEELS: set[str] = set()
+GENERATORS = {"fastjsonschema"}
 
 
 @dataclass(frozen=True, kw_only=True)

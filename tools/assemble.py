@@ -55,7 +55,7 @@ def lay_out(dist: Path, wheels: list[Path], archives: archive.Archives) -> dict[
     shutil.copytree(WEB, dist, ignore=NOT_PUBLISHED)
     vendor.copy_vendor_modules(dist)
     told = archive.lay_out(archives, dist)
-    pure = downloads.pure_wheels(archive.RUN_TIME_WHEELS)
+    pure = downloads.pure_wheels(archive.RUN_TIME_WHEELS | archive.GENERATORS)
     (dist / "notices.txt").write_text(notices([wheels[0], *pure]), encoding="utf-8")
     build = precache.write_build(dist, told, about(archives.python))
     check_page(dist)

@@ -7,7 +7,19 @@ import json
 from pathlib import Path
 
 PACKAGE = Path(__file__).resolve().parent.parent / "pysolver"
-HEADER = '"""Generated from record.schema.json by tools/record_validator.py. Do not edit."""\n\n'
+IMPORT = "from fastjsonschema import JsonSchemaValueException, JsonSchemaValuesException\n"
+HEADER = '''"""Generated from record.schema.json by fastjsonschema and tools/record_validator.py. Do not edit."""
+
+
+class JsonSchemaValueException(ValueError):
+    """What a document breaks; here so that fastjsonschema itself need not travel to a phone."""
+
+    def __init__(self, message):
+        super().__init__(message)
+        self.message = message
+
+
+'''
 
 
 def code() -> str:
@@ -16,7 +28,9 @@ def code() -> str:
 
     schema = json.loads((PACKAGE / "record.schema.json").read_text("utf-8"))
     made: str = fastjsonschema.compile_to_code(schema, detailed_exceptions=False)
-    return HEADER + made
+    if IMPORT not in made or "JsonSchemaValuesException(" in made:
+        raise SystemExit("fastjsonschema writes another form of code than this script knows: adapt it.")
+    return HEADER + made.replace(IMPORT, "")
 
 
 if __name__ == "__main__":

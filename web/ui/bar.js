@@ -40,7 +40,8 @@ export function OutcomeBar({ controller }) {
   const { word, lines, typing } = barOf(controller);
   const go = () => controller.go(controller.state.current.value?.refusal?.field || '/result');
   return html`<button class=${`outcome-bar is-${word} ${typing ? 'is-typing' : ''}`} aria-label=${`Outcome: ${lines.filter(Boolean).map((line) => line.replace(/\.$/, '')).join('. ')}. Open the result`} onClick=${go}>
-    <span class="outcome-mark" aria-hidden="true"><${OutcomeShape} word=${word} /><b class="outcome-word">${WORDS[word] ?? ''}</b></span>
-    <span class="outcome-lines" role="status" aria-live="polite">${[0, 1, 2].map((i) => html`<span key=${i} class=${i === 0 ? 'outcome-first' : ''}>${lines[i] ?? ''}</span>`)}</span>
+    <span class="outcome-mark" aria-hidden="true"><span class="outcome-picture"><${OutcomeShape} word=${word} /></span><b class="outcome-word">${WORDS[word] ?? ''}</b></span>
+    <span class="outcome-lines" role="status" aria-live="polite"><span class="outcome-first">${lines[0] ?? ''}</span>
+      <span class="outcome-rest"><span>${lines[1] ?? ''}</span> <span class="outcome-now">${lines[2] ?? ''}</span></span></span>
   </button>`;
 }

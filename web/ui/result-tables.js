@@ -8,10 +8,24 @@ const STATES = { within: 'within', close: 'close', over: 'over', not_judged: 'no
 export function CriteriaTable({ result }) {
   const rows = result.criteria ?? [];
   if (!rows.length) return html`<p class="quiet">Nothing to compare yet.</p>`;
-  return html`<section aria-label="Governing"><h2>Compared, place by place</h2><ul class="criteria">${rows.map((/** @type {any} */ row) => html`<li class=${`criterion is-${row.state}`}>
-    <p class="criterion-head"><b>${row.title}</b><span class="criterion-state">${STATES[row.state] ?? row.state}</span></p>
-    <dl>${pair('Where', row.place)}${pair('Unfactored', row.unfactored)}${pair('Factored', row.factored)}${pair('Worst case', row.high)}${pair('Limit', row.limit)}${pair('Ratio', row.ratio)}${pair('Ratio, worst case', row.ratio_high)}${pair('Combination', row.combination)}${pair('Document', row.document)}</dl>
-    ${row.note && html`<p class="quiet">${row.note}</p>`}</li>`)}</ul></section>`;
+  return html`<section aria-label="Governing"><h2>Compared, place by place</h2><${Criteria} rows=${rows} /></section>`;
+}
+
+/** What governs, by itself: the first of the list. @param {{result: any}} props */
+export function FirstCriterion({ result }) {
+  const rows = (result.criteria ?? []).slice(0, 1);
+  return rows.length ? html`<div class="governs"><h3>Governs</h3><${Criteria} rows=${rows} /></div>` : null;
+}
+
+/** @param {{rows: any[]}} props */
+function Criteria({ rows }) {
+  return html`<p class="criteria-head" aria-hidden="true"><span>ratio to the limit:</span><span>best</span><span>worst</span></p>
+    <ul class="criteria">${rows.map((row) => html`<li class=${`criterion is-${row.state}`}>
+      <p class="criterion-name"><b>${row.title}</b> <span class="criterion-state">${STATES[row.state] ?? row.state}</span></p>
+      <p class="criterion-ratios"><span class="unseen">Ratio </span><b>${row.ratio}</b>${row.ratio_high && html`<span class="unseen"> worst </span><b>${row.ratio_high}</b>`}</p>
+      <p class="criterion-place">${row.place}</p>
+      <dl class="criterion-figures">${pair('Unfactored', row.unfactored)}${pair('Factored', row.factored)}${pair('Worst', row.high)}${pair('Limit', row.limit)}</dl>
+      <p class="criterion-source">${[row.combination, row.document, row.note].filter(Boolean).join('; ')}</p></li>`)}</ul>`;
 }
 
 /** @param {string} name @param {any} value */
@@ -21,7 +35,7 @@ const pair = (name, value) => (value === null || value === undefined || value ==
 export function ReactionsTable({ result }) {
   const rows = result.reactions ?? [];
   if (!rows.length) return null;
-  return html`<section aria-label="Reactions"><h2>Reactions, positive up, unfactored</h2><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best</th><th scope="col">Low</th><th scope="col">High</th></tr></thead>
+  return html`<section aria-label="Reactions"><h2>Reactions, positive up</h2><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best<small>unfactored</small></th><th scope="col">Low<small>factored</small></th><th scope="col">High<small>factored</small></th></tr></thead>
     <tbody>${rows.map((/** @type {any} */ row) => html`<tr><th scope="row">${row.support}</th><td>${row.unfactored}</td><td>${row.low}</td><td>${row.high}</td></tr>${(row.unit_note || row.fixing) && html`<tr><td colspan="4" class="quiet">${[row.unit_note, row.fixing].filter(Boolean).join('; ')}</td></tr>`}`)}</tbody></table></section>`;
 }
 

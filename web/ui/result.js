@@ -3,7 +3,7 @@ import { useState } from '../vendor/preact-hooks.js';
 import { OutcomeShape } from './bar.js';
 import { html } from './html.js';
 import { ResultDrawings } from './result-drawings.js';
-import { CriteriaTable, Lists, ReactionsTable } from './result-tables.js';
+import { CriteriaTable, FirstCriterion, Lists, ReactionsTable } from './result-tables.js';
 
 /** @typedef {import('../controller.js').Controller} Controller */
 
@@ -18,26 +18,35 @@ export function ResultView({ controller }) {
   }
   return html`<div class="result">
     ${state.typing.value.length > 0 && html`<p class="standing hatched">typing: this result is for the earlier values</p>`}
-    <${Verdict} result=${result} onGo=${controller.go} />
+    <${Verdict} result=${result} onGo=${controller.go} onDecide=${goToDecision} />
     <${Problems} result=${result} controller=${controller} />
-    <${Decision} key=${state.entry.value?.id} controller=${controller} result=${result} />
+    <${FirstCriterion} result=${result} />
     <${ResultDrawings} controller=${controller} />
     <${CriteriaTable} result=${result} /><${ReactionsTable} result=${result} />
-    <button class="key key-main" onClick=${() => controller.show({ name: 'share', id: state.entry.value?.id })}>Share this check</button>
+    <${Decision} key=${state.entry.value?.id} controller=${controller} result=${result} />
+    <button class="key key-main key-on" onClick=${() => controller.show({ name: 'share', id: state.entry.value?.id })}>Share this check</button>
     <${Lists} result=${result} />
   </div>`;
 }
 
-/** @param {{result: any, onGo?: (path:string)=>void}} props */
-export function Verdict({ result, onGo }) {
+/** The decision stands below the figures it rests on; this leads there without picking anything. */
+function goToDecision() {
+  const heading = document.getElementById('decision');
+  heading?.focus({ preventScroll: true });
+  heading?.scrollIntoView({ block: 'start' });
+}
+
+/** @param {{result: any, onGo?: (path:string)=>void, onDecide?: ()=>void}} props */
+export function Verdict({ result, onGo, onDecide }) {
   const { outcome } = result;
   const [first, ...others] = outcome.missing ?? [];
   const named = new Set((outcome.missing ?? []).map((/** @type {any} */ fact) => fact.text));
   const reasons = (outcome.reasons ?? []).filter((/** @type {string} */ reason) => !named.has(reason));
-  return html`<section class=${`verdict is-${outcome.word}`} aria-label="Outcome in full"><div class="verdict-mark"><${OutcomeShape} word=${outcome.word} /></div>
+  return html`<section class=${`verdict is-${outcome.word}`} aria-label="Outcome in full"><div class="verdict-mark" aria-hidden="true"><${OutcomeShape} word=${outcome.word} /></div>
     <div class="verdict-words"><h2>${outcome.title}</h2>${outcome.as_found && html`<p>${outcome.as_found}</p>`}
       ${outcome.lapsed && html`<p><b>as found earlier, look again</b></p>`}
-      ${outcome.rules_out && html`<p>Rules out: <b>${outcome.rules_out}</b></p>`}${outcome.until && html`<p>Holds until ${outcome.until} or any change.</p>`}</div>
+      ${outcome.rules_out && html`<p>Rules out: <b>${outcome.rules_out}</b></p>`}${outcome.until && html`<p>Holds until ${outcome.until} or any change.</p>`}
+      ${onDecide && html`<button class="key key-decide" onClick=${onDecide}>Decide ›</button>`}</div>
     ${reasons.length > 0 && html`<ul class="reasons">${reasons.map((/** @type {string} */ reason) => html`<li>${reason}</li>`)}</ul>`}
     ${first && html`<${Missing} fact=${first} onGo=${onGo} main />`}
     ${others.length > 0 && html`<details class="missing"><summary>${others.length} more ${others.length === 1 ? 'fact is' : 'facts are'} missing</summary>${others.map((/** @type {any} */ fact) => html`<${Missing} fact=${fact} onGo=${onGo} />`)}</details>`}
@@ -71,7 +80,7 @@ function Decision({ controller, result }) {
     setSaid('');
     void controller.editing.decide(choice, name.trim());
   };
-  return html`<section class="decision" aria-label="Decision"><h2>Decision, yours and not the tool’s</h2>
+  return html`<section class="decision" aria-label="Decision"><h2 id="decision" tabindex="-1">Decision, yours and not the tool’s</h2>
     ${made && html`<p class="made">Decided: <b>${result.decisions?.find((/** @type {any} */ one) => one.id === made.choice)?.label ?? made.choice}</b>, ${made.name}, ${made.time.slice(0, 16).replace('T', ' ')}</p>`}
     <fieldset class="choices" aria-label="Decision"><legend>What is left to pick</legend><div class="choice-list">${(result.decisions ?? []).map((/** @type {any} */ one) => one.ruled_out
       ? html`<p key=${one.id} class="choice is-struck"><span class="choice-mark" aria-hidden="true"></span><span class="choice-words"><del>${one.label}</del><small>${one.why}</small></span></p>`
