@@ -71,6 +71,12 @@ def faults(page: Page, name: str, *, wide: bool) -> list[str]:
     return [f"{name}: {text}" for text in wrong]
 
 
+def nothing_wrong(found: list[str]) -> None:
+    """Fail with the whole list."""
+    if found:
+        pytest.fail(f"{len(found)} faults:\n" + "\n".join(found), pytrace=False)
+
+
 def unfold(page: Page) -> None:
     """Open everything that can be folded out."""
     page.evaluate("() => document.querySelectorAll('details').forEach((one) => { one.open = true; })")
@@ -176,11 +182,11 @@ def share_and_list(page: Page, person: Person, look: Callable[[str], None]) -> N
 
 
 def test_every_screen_on_a_phone(phone: Device) -> None:
-    assert "\n".join(every_screen(phone)) == ""
+    nothing_wrong(every_screen(phone))
 
 
 def test_every_screen_on_a_desk(desk: Device) -> None:
-    assert "\n".join(every_screen(desk)) == ""
+    nothing_wrong(every_screen(desk))
 
 
 @pytest.mark.parametrize("light", ["Dark", "Bright sun: black on white"])
@@ -199,4 +205,4 @@ def test_other_light_and_large_type(phone: Device, light: str) -> None:
     wrong += faults(page, f"72-{name}-load", wide=False)
     person.tap(page.get_by_role("textbox", name="Load 2, size per length", exact=True))
     wrong += faults(page, f"73-{name}-pad", wide=False)
-    assert "\n".join(wrong) == ""
+    nothing_wrong(wrong)

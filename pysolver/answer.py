@@ -12,7 +12,7 @@ from typing import Any
 
 import numpy as np
 
-from pysolver import __version__
+import pysolver
 from pysolver.check import Result
 from pysolver.display import System, show, show_beside, show_range, show_ratio
 from pysolver.facts import distressed
@@ -20,7 +20,7 @@ from pysolver.figures import drawings
 from pysolver.governing import least_reaction
 from pysolver.limits import name_of_sheet
 from pysolver.model import span_rule
-from pysolver.outcome import CLEAR, Compared, lapsed, ruled_out, state, valid_until, what_now
+from pysolver.outcome import CLEAR, CLOSE, WITHIN, Compared, lapsed, ruled_out, state, valid_until, what_now
 from pysolver.record import VERSION, Record, moment
 from pysolver.statics import extremes, solve
 from pysolver.vocabulary import words
@@ -31,7 +31,8 @@ DIMENSION = {"sagging": "moment", "hogging": "moment", "shear": "force", "reacti
 
 def versions() -> dict[str, str]:
     """What computed an answer: it travels with every record, link and report."""
-    return {"asfound": __version__, "python": platform.python_version(), "numpy": np.__version__, "record": str(VERSION)}
+    return {"asfound": f"{pysolver.__version__} {pysolver.BUILD[:8]}", "python": platform.python_version(),
+            "numpy": np.__version__, "record": str(VERSION)}
 
 
 def answer(result: Result, now: str | None = None) -> dict[str, Any]:
@@ -82,7 +83,7 @@ def outcome(result: Result, system: System, now: str | None) -> dict[str, Any]:
             "missing": [{"text": g.text, "who": g.who, "path": g.path} for g in decided.gaps],
             "treated_as_over": decided.treated_as_over, "lapsed": old,
             "as_found": as_found(record["found_at"]),
-            "until": until}
+            "until": until if decided.word in (WITHIN, CLOSE) else ""}
 
 
 def as_found(found_at: str | None) -> str:
@@ -101,7 +102,7 @@ def _decision_label(choice: str) -> str:
 def bar_numbers(leading: Compared | None) -> str:
     """Second line of the bar, as short as it can be read: what governs, where, its ratio, and that of the worst case."""
     if leading is None or leading.ratio is None:
-        return "No ratio to a limit can be given yet."
+        return "No ratio can be given yet."
     title = leading.title.removeprefix("Bending, ")
     place, spanned, span = leading.place.partition(", span ")
     text = f"{title[:1].upper()}{title[1:]}, {place}{f' ({span})' * bool(spanned)}: {show_ratio(leading.ratio)}"

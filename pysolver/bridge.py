@@ -5,10 +5,11 @@ message}}. kind "input": the person can put it right; "internal": our fault, and
 """
 
 import json
+import os
 from collections.abc import Callable
 from typing import Any
 
-from pysolver import __version__
+import pysolver
 from pysolver.answer import answer, versions
 from pysolver.beam import Beam, Stretch, Support
 from pysolver.check import run_check
@@ -24,6 +25,8 @@ from pysolver.recorded import carried, opened, short
 from pysolver.statics import extremes, solve
 from pysolver.units import parse
 from pysolver.vocabulary import words
+
+pysolver.BUILD = os.environ.get("ASFOUND_BUILD", pysolver.BUILD)
 
 MAX_REQUEST = 4_000_000  # characters
 STEPS = {"metric": ("-500 mm", "-100 mm", "-10 mm", "10 mm", "100 mm", "500 mm"), "us": ("-12 in", "-1 in", "1 in", "12 in")}
@@ -72,7 +75,7 @@ def self_check(request: dict[str, Any]) -> dict[str, Any]:
     error = max(abs(a - b) / abs(b) for a, b in zip(found, expected, strict=True))
     if not error < 1e-9:
         raise InternalError(code="self_check", message="The solver does not get a known beam right on this device.")
-    return {"ok": True, "shown": f"asfound {__version__}: a known beam comes out right to {max(error, 1e-16):.0e}."}
+    return {"ok": True, "shown": f"asfound {pysolver.__version__}: a known beam comes out right to {max(error, 1e-16):.0e}."}
 
 
 def read(request: dict[str, Any]) -> dict[str, Any]:

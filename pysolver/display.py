@@ -105,6 +105,13 @@ def show(dimension: str, value: float, system: System = "metric") -> str:
     return _shown(dimension, value, system, ROUND_HALF_UP)
 
 
+def show_place(value: float, system: System = "metric") -> str:
+    """A place along the beam as one would tape it: to the centimetre, feet and inches to 1/16."""
+    if system == "us":
+        return show("length", value, system)
+    return f"{_clean(_exact(value)).quantize(Decimal('0.01'), ROUND_HALF_UP)} m"
+
+
 def also(dimension: str, value: float, system: System = "metric") -> str:
     """The same value in the other system of units."""
     return show(dimension, value, "us" if system == "metric" else "metric")

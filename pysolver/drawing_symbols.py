@@ -1,6 +1,7 @@
 """How are supports, arrows, moments and dimensions drawn, and which key explains the lines of a curve?
 
-Ink symbols of the drawing office, told apart by shape alone. Viewbox units, y down. (x, y) of a support is the place where the underside of the beam rests on it.
+Ink symbols of the drawing office, told apart by shape alone. Viewbox units, y down.
+(x, y) of a support is the place where the underside of the beam rests on it.
 """
 
 import math

@@ -11,6 +11,7 @@ from dataclasses import dataclass
 from typing import Any
 
 from pysolver.combinations import sets
+from pysolver.display import System, show
 from pysolver.errors import InputError
 from pysolver.found import Layout
 from pysolver.limits import is_simple_span, name_of_sheet, set_of
@@ -151,28 +152,31 @@ def _span_and_restraint(record: Record, readings: Readings, layout: Layout, i: i
             yield Gap(text=f"{name} counts on full sideways restraint, which was not found", who=OFFICE,
                       path="/restraint/answer", sheet=i, moments=True, void=True)
         return
-    yield from _issued_span(readings, layout, i, name)
-    yield from _issued_spacing(readings, i, name, found)
+    system = record["settings"]["display"]
+    yield from _issued_span(readings, layout, i, name, system)
+    yield from _issued_spacing(readings, i, name, found, system)
 
 
-def _issued_span(readings: Readings, layout: Layout, i: int, name: str) -> Iterator[Gap]:
+def _issued_span(readings: Readings, layout: Layout, i: int, name: str, system: System) -> Iterator[Gap]:
     issued = readings.issued.get(f"/limits/{i}/span")
     if issued is None:
         yield Gap(text=f"{name}: for what span the moment limit was issued", who=OFFICE, path=f"/limits/{i}/span", sheet=i,
                   moments=True)
         return
+    for_span = show("length", issued, system)
     for k, (start, end) in enumerate(layout.spans):
         path, measured = f"/spans/{k}/length", readings.measured[f"/spans/{k}/length"]
         if end - start > issued + TAPE:
-            yield Gap(text=f"the span found, {end - start:.3f} m, is longer than the {issued:.3f} m that {name} was issued for",
+            yield Gap(text=f"the span found, {show('length', end - start, system)}, is longer than the {for_span} that {name} "
+                           "was issued for",
                       who=OFFICE, path=path, sheet=i, moments=True, void=True)
             return
         if end - start + measured.high - measured.best > issued + 2 * TAPE:
-            yield Gap(text=f"whether the span is longer than the {issued:.3f} m that {name} was issued for: it may be",
+            yield Gap(text=f"whether the span is longer than the {for_span} that {name} was issued for: it may be",
                       who="whoever can tape it", path=path, sheet=i, moments=True)
 
 
-def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any]) -> Iterator[Gap]:
+def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any], system: System) -> Iterator[Gap]:
     issued = readings.issued.get(f"/limits/{i}/restraint_spacing")
     if issued is None:
         yield Gap(text=f"{name}: for what restraint spacing the moment limit was issued", who=OFFICE,
@@ -185,10 +189,11 @@ def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any]
         yield Gap(text="the distance between the places where the beam is held sideways", who="whoever can see its top",
                   path="/restraint/spacing", sheet=i, moments=True)
     elif spacing.best <= issued + TAPE < spacing.high - TAPE:
-        yield Gap(text=f"whether the restraint spacing is wider than the {issued:.3f} m of {name}: it may be",
+        yield Gap(text=f"whether the restraint spacing is wider than the {show('length', issued, system)} of {name}: it may be",
                   who="whoever can tape it", path="/restraint/spacing", sheet=i, moments=True)
     elif spacing.best > issued + TAPE:
-        yield Gap(text=f"the restraint spacing found, {spacing.best:.3f} m, is wider than the {issued:.3f} m of {name}",
+        yield Gap(text=f"the restraint spacing found, {show('length', spacing.best, system)}, is wider than the "
+                       f"{show('length', issued, system)} of {name}",
                   who=OFFICE, path="/restraint/spacing", sheet=i, moments=True, void=True)
 
 

@@ -15,6 +15,7 @@ from pysolver import piecewise
 from pysolver.bounds import search
 from pysolver.combinations import ranges
 from pysolver.comparison import Along, Judged, chunks, compare, factor_ranges, ratio_of, solve_layouts, without_limit
+from pysolver.display import show_place
 from pysolver.envelope import Worst
 from pysolver.facts import Gap
 from pysolver.found import SELF_WEIGHT, Layout, span_name
@@ -255,13 +256,14 @@ def place_name(record: Record, layout: Layout, x: float, support: int = -1) -> s
     for j in layout.real:
         if abs(x - layout.supports[j]) < 1e-6:
             return f"at {record['supports'][j]['name']}"
+    system = record["settings"]["display"]
     for i, (start, end) in enumerate(layout.spans):
         if start <= x <= end:
-            return f"{x - start:.2f} m from {record['supports'][i]['name']}, span {span_name(record, i)}"
+            return f"{show_place(x - start, system)} from {record['supports'][i]['name']}, span {span_name(record, i)}"
     first, last = record["supports"][0]["name"], record["supports"][-1]["name"]
     if x < layout.supports[0]:
-        return f"{layout.supports[0] - x:.2f} m left of {first}, overhang"
-    return f"{x - layout.supports[-1]:.2f} m right of {last}, overhang"
+        return f"{show_place(layout.supports[0] - x, system)} left of {first}, overhang"
+    return f"{show_place(x - layout.supports[-1], system)} right of {last}, overhang"
 
 
 def infinite_hold_down(model: Model, best: Along, least_worst: dict[int, float]) -> list[Compared]:

@@ -21,7 +21,7 @@ MAX_NUMBERS = 2000
 def carried(document: Any) -> dict[str, Any]:
     """A record as it travels. Raises InputError when it is no record."""
     result = run_check(document)
-    return {"record": with_values(result), "numbers": {k: float(f"{v:.10e}") for k, v in numbers(result).items()},
+    return {"record": with_values(result), "numbers": {k: float(f"{v:.9e}") for k, v in numbers(result).items()},
             "versions": versions(), "outcome": {"word": result.outcome.word, "title": result.outcome.title}}
 
 

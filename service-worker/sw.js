@@ -75,7 +75,11 @@ async function keepAll() {
       await tellPages({ type: 'install-progress', version: VERSION, done, total: TOTAL });
     }
   }
-  await Promise.all(Array.from({ length: AT_ONCE }, keepSome));
+  // One failure ends all: what the others would still fetch is not asked for, and no progress is told after the reason.
+  const stop = (/** @type {unknown} */ error) => { waiting.length = 0; throw error; };
+  const ends = await Promise.allSettled(Array.from({ length: AT_ONCE }, () => keepSome().catch(stop)));
+  const failed = ends.find((end) => end.status === 'rejected');
+  if (failed) throw failed.reason;
 }
 
 async function install() {

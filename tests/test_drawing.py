@@ -17,6 +17,9 @@ import pytest
 from numpy.polynomial import polynomial
 
 from pysolver import drawing, drawing_bezier, drawing_curves
+from pysolver.answer import answer
+from pysolver.check import run_check
+from pysolver.demo import demo
 from pysolver.drawing import Mark, Rail
 from pysolver.found import Layout, lay_out
 from pysolver.frame import Reading
@@ -230,6 +233,86 @@ def test_the_worst_case_is_a_second_curve_at_its_own_height() -> None:
     depth = {name: max(y for piece in beziers(path_of(markup, name)) for _, y in piece) - base
              for name in ("curve", "curve-high")}
     assert depth["curve-high"] == pytest.approx(1.5 * depth["curve"], rel=1e-3)
+
+
+def upright_boxes(markup: str) -> list[tuple[str, float, float, float, float]]:
+    """Text, left, right, top, bottom, from the count of characters at half the font size each (from memory: what a common
+    sans-serif face needs), capitals 0.7 of it high."""
+    boxes = []
+    for e in parsed(markup).iter(f"{SVG}text"):
+        if "transform" not in e.attrib:
+            x, y, size = (float(e.attrib[name]) for name in ("x", "y", "font-size"))
+            long = 0.5 * size * len(e.text or "")
+            left = x - {"start": 0.0, "middle": long / 2, "end": long}[e.attrib["text-anchor"]]
+            boxes.append((e.text or "", left, left + long, y - 0.7 * size, y))
+    return boxes
+
+
+def two_spans() -> Record:
+    return record_of(["5.4", "4.2"], ["bearing", "bearing", "pinned"],
+                     [load(1, "line", "8", whole_beam=True), load(2, "point", "20", at(0, "right", "2.2"))])
+
+
+def figures_across(markup: str) -> list[str]:
+    """Texts of a curve that lie across a rail or a governing mark."""
+    rails = [(float(e.attrib["x1"]), float(e.attrib["x2"]), float(e.attrib["y1"])) for e in parsed(markup).iter(f"{SVG}line")
+             if e.attrib.get("class") == "rail"]
+    rings = [(float(e.attrib["cx"]), float(e.attrib["cy"]), float(e.attrib["r"])) for e in parsed(markup).iter(f"{SVG}circle")
+             if e.attrib.get("class") == "gov"]
+    assert rails
+    assert rings
+    return [words for words, left, right, top, bottom in upright_boxes(markup)
+            if any(left < x1 and x0 < right and top < y < bottom for x0, x1, y in rails)
+            or any(left < cx + r and cx - r < right and top < cy + r and cy - r < bottom for cx, cy, r in rings)]
+
+
+def test_no_figure_lies_across_a_rail_or_a_governing_mark() -> None:
+    """The demonstration check once had the moment over its support written across the limit."""
+    for system in ("metric", "us"):
+        record = demo()
+        record["settings"]["display"] = system
+        drawings = answer(run_check(record))["drawings"]
+        for quantity in ("shear", "moment", "sag"):
+            assert figures_across(drawings[quantity]) == [], f"{quantity}, {system}"
+
+
+@pytest.mark.parametrize("times", [1.02, 1.2, 1.5, 2.0])
+@pytest.mark.parametrize("quantity", ["shear", "moment"])
+def test_nor_with_rails_at_any_distance(quantity: drawing_curves.Quantity, times: float) -> None:
+    record = two_spans()
+    _, layout, response = solved(record)
+    values = [v for many in drawing_curves.peaks(drawing_curves.best_pieces(quantity, response, layout)) for _, v in many]
+    rails = [Rail(start=0.0, end=9.6, value=abs(times * v), sign=1 if v > 0 else -1, label=f"limit {abs(times * v):.0f}")
+             for v in (min(values), max(values))]
+    governing = [Mark(x=5.4, value=1.2 * min(values), label="0.97 of the limit")]
+    assert figures_across(curve(quantity, record, rails, governing, worst=1.3)) == []
+
+
+def test_only_the_side_of_its_own_limit_is_drawn_as_the_worst_case_and_the_other_as_the_least_effect() -> None:
+    record = two_spans()
+    _, layout, response = solved(record)
+    best = drawing_curves.best_pieces("moment", response, layout)
+    high, low = ([(a, b, f * c) for a, b, c in best] for f in (1.5, 0.5))
+    for sagging in (True, False):
+        markup = drawing.curve("moment", response, layout, high=high if sagging else None, low=None if sagging else low,
+                               rails=[], governing=[], system="metric")
+        base = next(float(e.attrib["y1"]) for e in parsed(markup).iter(f"{SVG}line") if e.attrib.get("class") == "axis")
+        worst, least = (beziers(path_of(markup, name)) for name in ("curve-high", "curve-least"))
+        below, above = (worst, least) if sagging else (least, worst)
+        assert min(p[3][1] for p in below) >= base - 0.01
+        assert max(p[3][1] for p in above) <= base + 0.01
+        across = sum(p[3][0] - p[0][0] for p in [*worst, *least])
+        assert across == pytest.approx(296.0, abs=0.05), "the whole beam, once"
+
+
+def test_the_key_fits_the_paper_and_names_every_line_that_is_drawn() -> None:
+    rails = [Rail(start=0.0, end=9.6, value=60e3, sign=sign, label="limit 60.0 kN·m") for sign in (1, -1)]
+    for markup in (curve("moment", two_spans(), rails, [Mark(x=5.4, value=-30e3, label="0.50 of the limit")], worst=1.3),
+                   curve("moment", two_spans()), curve("moment", record_of(["4.0"], ["bearing", "pinned"]))):
+        assert not [one for one in upright_boxes(markup) if one[2] > 340.0]
+        lines = {e.attrib.get("class") for e in parsed(markup).iter(f"{SVG}path")} & {"curve-high", "curve-least"}
+        samples = {e.attrib.get("class") for e in parsed(markup).iter(f"{SVG}line")} & {"curve-high", "curve-least"}
+        assert lines == samples
 
 
 def test_a_beam_without_any_moment_gets_a_straight_line_and_no_values_of_rounding_residues() -> None:

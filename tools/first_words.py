@@ -21,7 +21,8 @@ def code() -> str:
     said = json.loads(handle('{"call": "hello"}'))["result"]
     later = ("cautions", "not_compared", "limits_of_tool")  # shown with a result, which there is none of yet
     lists = {name: value for name, value in said["vocabulary"].items() if name not in later}
-    return HEADER + json.dumps({"vocabulary": lists, "units": said["units"], "steps": said["steps"]}, indent=1, ensure_ascii=False) + ";\n"
+    kept = {"vocabulary": lists, "units": said["units"], "steps": said["steps"]}
+    return HEADER + json.dumps(kept, indent=1, ensure_ascii=False) + ";\n"
 
 
 if __name__ == "__main__":

@@ -118,7 +118,7 @@ export function startOffline({ onState }) {
     const message = /** @type {FromServiceWorker} */ (data);
     heard = Date.now();
     if (message.type === 'install-failed') installFailure = message.message;
-    else if (message.type === 'install-progress' && !registration?.active) {
+    else if (message.type === 'install-progress' && !registration?.active && !installFailure) {
       say('downloading', 'Fetching the app for use without signal', message.done, message.total);
     }
   });

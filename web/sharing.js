@@ -2,12 +2,13 @@
 import { isoWithZone } from './changes.js';
 import { wholeRecord } from './shape.js';
 
-export const LINK_START = 'r1';
+/** Links of any version: Python says what it can read. */
+export const LINK_START = /^r\d/;
 
 /** @param {{state: import('./state.js').State, ask: (call:string, payload:any) => Promise<any>, library: ReturnType<typeof import('./library.js').createLibrary>}} parts */
 export function createSharing({ state, ask, library }) {
   const appUrl = () => location.origin + location.pathname;
-  const fragment = () => { const raw = location.hash.slice(1); return raw.startsWith(LINK_START) ? raw : ''; };
+  const fragment = () => { const raw = location.hash.slice(1); return LINK_START.test(raw) ? raw : ''; };
 
   /** Makes the link of the open check. */
   async function makeLink() {

@@ -35,13 +35,13 @@ export function barOf(controller) {
   return { word: 'working', typing: false, lines: ['working out the newest values', answer.value ? 'The earlier result no longer stands.' : '', ''] };
 }
 
-/** @param {{controller: Controller}} props */
+/** The word under the shape is drawn by the style sheet: the name of the button says it already. @param {{controller: Controller}} props */
 export function OutcomeBar({ controller }) {
   const { word, lines, typing } = barOf(controller);
   const go = () => controller.go(controller.state.current.value?.refusal?.field || '/result');
   return html`<button class=${`outcome-bar is-${word} ${typing ? 'is-typing' : ''}`} aria-label=${`Outcome: ${lines.filter(Boolean).map((line) => line.replace(/\.$/, '')).join('. ')}. Open the result`} onClick=${go}>
-    <span class="outcome-mark" aria-hidden="true"><span class="outcome-picture"><${OutcomeShape} word=${word} /></span><b class="outcome-word">${WORDS[word] ?? ''}</b></span>
-    <span class="outcome-lines" role="status" aria-live="polite"><span class="outcome-first">${lines[0] ?? ''}</span>
-      <span class="outcome-rest"><span>${lines[1] ?? ''}</span> <span class="outcome-now">${lines[2] ?? ''}</span></span></span>
+    <span class="outcome-mark" aria-hidden="true"><span class="outcome-picture"><${OutcomeShape} word=${word} /></span><b class="outcome-word" data-word=${WORDS[word] ?? ''}></b></span>
+    <span class="outcome-lines" role="status" aria-live="polite"><span class="outcome-first">${lines[0] ?? ''}</span>${' '}
+      <span class="outcome-rest"><span>${lines[1] ?? ''}</span>${' '}<span class="outcome-now">${lines[2] ?? ''}</span></span></span>
   </button>`;
 }

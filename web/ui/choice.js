@@ -23,11 +23,12 @@ function useHelp(legend, options) {
 export function Choices({ name, legend, options, value, locked, small, help, onChoose }) {
   const group = name.replace(/[^a-zA-Z0-9]/g, '-');
   const [told, tell] = useHelp(legend, small ? [] : options);
+  const chosen = options.find((option) => option.id === value);
   return html`<fieldset class=${small ? 'choices choices-small' : `choices ${told} ${inTwo(options)}`} aria-label=${name}>
     <legend>${legend}</legend>${tell}${help && html`<p class="help">${help}</p>`}
     <div class="choice-list">${options.map((option) => html`<label key=${option.id} class=${value === option.id ? 'choice is-chosen' : 'choice'}>
       <input type="radio" name=${group} aria-label=${`${name}: ${option.label}`} checked=${value === option.id} disabled=${locked} onChange=${() => onChoose(option.id)} />
-      <span class="choice-mark" aria-hidden="true"></span><span class="choice-words">${option.label}${option.help && html`<small>${option.help}</small>`}</span></label>`)}</div>
+      <span class="choice-mark" aria-hidden="true"></span><span class="choice-words">${option.label}${option.help && html`<small>${option.help}</small>`}</span></label>`)}</div>${!small && inTwo(options) && chosen?.help && html`<p class="help picked-help">${chosen.help}</p>`}
   </fieldset>`;
 }
 

@@ -1,4 +1,5 @@
 // How are figures and units typed with a wet glove? Keys of 56 by 52 pixels or more; the unit is a key.
+import { useRef } from '../vendor/preact-hooks.js';
 import { typed, withUnit } from '../drafts.js';
 import { html } from './html.js';
 import { idOf, Means, NumberField } from './number-field.js';
@@ -25,18 +26,24 @@ export function PadPanel({ controller, field }) {
 /** @param {{controller: Controller, field: Field}} props */
 function Pad({ controller, field }) {
   const { state, editing } = controller;
+  const written = useRef({ here: '', text: '', caret: 0 });
   const display = state.record.value?.settings.display === 'us' ? 'us' : 'metric';
   const units = state.words.value.units[display]?.[field.dimension ?? '']?.keys ?? [];
   const part = state.padPart.value;
   const input = () => /** @type {HTMLInputElement|null} */ (document.getElementById(part === 'text' ? idOf(field) : `${idOf(field)}-${part}`));
   const present = () => editing.draftNow(field)[part] ?? '';
+  const here = `${field.path} ${part}`;
   const write = (/** @type {string} */ text, /** @type {number} */ caret) => {
     editing.type(field, { [part]: text });
+    written.current = { here, text, caret };
     requestAnimationFrame(() => input()?.setSelectionRange(caret, caret));
   };
   const press = (/** @type {string} */ key) => {
     const text = present();
-    const next = typed(text, input()?.selectionStart ?? text.length, input()?.selectionEnd ?? text.length, key);
+    // Keys may come faster than the page is drawn: then the caret is where the last key left it, not where the input shows it.
+    const last = written.current;
+    const ahead = last.here === here && last.text === text && input()?.value !== text ? last.caret : null;
+    const next = typed(text, ahead ?? input()?.selectionStart ?? text.length, ahead ?? input()?.selectionEnd ?? text.length, key);
     write(next.text, next.caret);
   };
   const steps = part === 'text' && /\/position\/distance$/.test(field.path) && state.solver.value.state === 'ready' ? state.words.value.steps[display] ?? [] : [];

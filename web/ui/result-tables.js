@@ -35,7 +35,7 @@ const pair = (name, value) => (value === null || value === undefined || value ==
 export function ReactionsTable({ result }) {
   const rows = result.reactions ?? [];
   if (!rows.length) return null;
-  return html`<section aria-label="Reactions"><h2>Reactions, positive up</h2><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best<small>unfactored</small></th><th scope="col">Low<small>factored</small></th><th scope="col">High<small>factored</small></th></tr></thead>
+  return html`<section aria-label="Reactions"><h2>Reactions, positive up</h2><p class="quiet">Best: unfactored. Low and high: the least and the largest of all cases, with factors.</p><table class="ruled"><thead><tr><th scope="col">Support</th><th scope="col">Best</th><th scope="col">Low</th><th scope="col">High</th></tr></thead>
     <tbody>${rows.map((/** @type {any} */ row) => html`<tr><th scope="row">${row.support}</th><td>${row.unfactored}</td><td>${row.low}</td><td>${row.high}</td></tr>${(row.unit_note || row.fixing) && html`<tr><td colspan="4" class="quiet">${[row.unit_note, row.fixing].filter(Boolean).join('; ')}</td></tr>`}`)}</tbody></table></section>`;
 }
 

@@ -56,7 +56,7 @@ export function Verdict({ result, onGo, onDecide }) {
 /** A fact that is missing, and the way to it. @param {{fact: any, onGo?: (path:string)=>void, main?: boolean}} props */
 function Missing({ fact, onGo, main }) {
   return html`<div class="missing"><p>Missing: <b>${fact.text}</b>${fact.who ? html`<br />Who can give it: ${fact.who}` : ''}</p>
-    ${onGo && fact.path && html`<button class=${main ? 'key key-main' : 'key'} aria-label=${`Answer: ${fact.text}`} onClick=${() => onGo(fact.path)}>Answer it ›</button>`}</div>`;
+    ${onGo && fact.path && html`<button class=${main ? 'key key-main' : 'key'} aria-label=${`Answer: ${fact.text}`} onClick=${() => onGo(fact.path)}>Answer<span aria-hidden="true"> ›</span></button>`}</div>`;
 }
 
 /** @param {{controller: Controller, result: any}} props */
