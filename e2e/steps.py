@@ -83,6 +83,10 @@ class Person:
             with contextlib.suppress(TimeoutError):  # Next was just about to lead there
                 self.page.get_by_role("button", name=f"On to {title}", exact=True).tap(timeout=3000)
                 self.touches += 1
+        self.arrive(title)
+
+    def arrive(self, title: str) -> None:
+        """Wait until the page has led to a thing."""
         expect(self.page.get_by_role("combobox", name="Go to", exact=True).locator("option:checked")).to_have_text(title)
 
     def station(self) -> str:

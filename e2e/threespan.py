@@ -51,6 +51,7 @@ def one_span(person: Person, span: str, length: str) -> None:
     if following:
         person.go_to(f"Span {span}")
         person.press(f"Add a span to the right of {span}")
+        person.arrive(f"Span {following}")
         person.go_to(f"Span {span}")
 
 

@@ -17,6 +17,8 @@ import { createTabLock } from './tab-lock.js';
 
 /** A result lapses with time, so it is asked for again now and then. */
 const LOOK_AGAIN_MS = 240_000;
+/** As long as a finger takes to notice that the page has led on by itself. */
+const LED_ON_MS = 350;
 
 export function startController() {
   const state = createState();
@@ -87,8 +89,15 @@ export function startController() {
     if (field) state.focus.value = field.path;
   }
 
-  /** @param {number} step -1 or 1 */
+  let led = { to: '', at: -Infinity };
+
+  /** A finger that comes down just as Next leads on meant the thing before: it does not lead on twice. @param {number} step -1 or 1 */
   function walk(step) {
+    if (led.to !== state.screen.value.at || performance.now() - led.at > LED_ON_MS) stepTo(step);
+  }
+
+  /** @param {number} step */
+  function stepTo(step) {
     const all = state.walk.value;
     const at = all.findIndex((one) => one.path === stationOf(all, state.screen.value.at ?? '/place').path);
     const next = all[at + step];
@@ -112,7 +121,7 @@ export function startController() {
     const following = fieldAfter(station, field.path);
     if (following) { state.focus.value = null; state.focus.value = following.path; if (following.kind !== 'number') state.padUp.value = false; return; }
     state.padUp.value = false;
-    if (!state.screen.value.all && !isWide()) { walk(1); return; }
+    if (!state.screen.value.all && !isWide()) { stepTo(1); led = { to: state.screen.value.at ?? '', at: performance.now() }; return; }
     const after = state.walk.value[state.walk.value.indexOf(station) + 1];
     const first = after && fieldAfter(after, '');
     state.focus.value = null;

@@ -65,7 +65,7 @@ function spanStation(record, i, vocabulary) {
     make.number(`${path}/drawn`, 'Length on the drawing', 'length', { extra: true, means: null }),
   ];
   if (record.spans.length < MAX_SPANS) {
-    fields.push(make.action(path, 'Add a span to its right', (now) => addSpan(now, i), { name: `Add a span to the right of ${ends}`, go: `/spans/${i + 1}` }));
+    fields.push(make.action(path, 'Add a span to the right', (now) => addSpan(now, i), { name: `Add a span to the right of ${ends}`, go: `/spans/${i + 1}` }));
   }
   if (record.spans.length > 1) {
     fields.push(make.action(path, 'Remove this span', (now) => removeSpan(now, i), { name: `Remove span ${ends}`, removes: true, go: '/spans/0' }));

@@ -71,7 +71,7 @@ function TopLine({ controller, wide }) {
     <div class="top-title"><h1>${titleOf(entry)}</h1><span>${endsOf(entry.record)}</span></div>
     ${last && html`<button class="key" aria-label=${`Undo: ${last.label}`} onClick=${() => { void controller.editing.undo(); }}>Undo</button>`}
     ${wide ? html`<button class="key" onClick=${() => controller.show({ name: 'share', id: entry.id })}>Share</button>`
-      : html`<button class="key" aria-pressed=${Boolean(all)} aria-label="All fields" onClick=${() => controller.show({ ...state.screen.value, all: !all }, { replace: true })}>${all ? 'Walk' : 'All'}</button>`}
+      : html`<button class="key" aria-pressed=${Boolean(all)} aria-label="All fields" onClick=${() => controller.show({ ...state.screen.value, all: !all }, { replace: true })}>All</button>`}
   </header>
   ${state.readOnly.value && html`<p class="standing" role="alert">${state.readOnly.value} <button class="key" onClick=${controller.writeHere}>Write here</button></p>`}`;
 }
@@ -97,27 +97,35 @@ function selectedPick(picks, controller, station) {
   return found?.path;
 }
 
-/** @param {{controller: Controller, station: Station}} props */
+/**
+ * Keys are new with each station: when Next leads on just as a finger comes down, the finger's key is gone and does nothing,
+ * rather than leading on once more.
+ * @param {{controller: Controller, station: Station}} props
+ */
 function Walk({ controller, station }) {
   const all = controller.state.walk.value;
   const at = all.indexOf(station);
   const before = all[at - 1];
   const after = all[at + 1];
   return html`<nav class="walk" aria-label="Walk along the beam">
-    <button class="walk-key" disabled=${!before} aria-label=${before ? `Previous thing: ${before.title}` : 'Previous thing'} onClick=${() => controller.walk(-1)}>‹</button>
+    <button key=${`before ${station.path}`} class="walk-key" disabled=${!before} aria-label=${before ? `Previous thing: ${before.title}` : 'Previous thing'} onClick=${() => controller.walk(-1)}>‹</button>
     <label class="walk-name"><b aria-hidden="true">${station.title}</b><small aria-hidden="true">${at + 1} of ${all.length}</small>
       <select aria-label="Go to" value=${station.path} onChange=${(/** @type {any} */ event) => controller.go(event.currentTarget.value)}>${all.map((one) => html`<option key=${one.path} value=${one.path}>${one.title}</option>`)}</select></label>
-    <button class="walk-key" disabled=${!after} aria-label=${after ? `Next thing: ${after.title}` : 'Next thing'} onClick=${() => controller.walk(1)}>›</button>
+    <button key=${`after ${station.path}`} class="walk-key" disabled=${!after} aria-label=${after ? `Next thing: ${after.title}` : 'Next thing'} onClick=${() => controller.walk(1)}>›</button>
   </nav>`;
 }
 
-/** @param {{controller: Controller, station: Station}} props */
+/**
+ * Keys are new with each station: when Next leads on just as a finger comes down, the finger's key is gone and does nothing,
+ * rather than leading on once more.
+ * @param {{controller: Controller, station: Station}} props
+ */
 function OneStation({ controller, station }) {
   const after = controller.state.walk.value[controller.state.walk.value.indexOf(station) + 1];
   return html`<main class="station one-station" aria-label=${station.title}>${station.path !== '/result' && html`<h2 class="unseen">${station.title}</h2>`}<${SolverStanding} controller=${controller} />
     ${station.path === '/result' ? html`<${ResultView} controller=${controller} />`
       : html`<${StationFields} controller=${controller} station=${station} />`}
-    ${after && html`<button class="key key-on" aria-label=${`On to ${after.title}`} onClick=${() => controller.walk(1)}>On to ${after.title} ›</button>`}</main>`;
+    ${after && html`<button key=${station.path} class="key key-on" aria-label=${`On to ${after.title}`} onClick=${() => controller.walk(1)}>On to ${after.title} ›</button>`}</main>`;
 }
 
 /** The same questions as an ordinary list. @param {{controller: Controller, station: Station, withResult?: boolean}} props */

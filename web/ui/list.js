@@ -53,8 +53,8 @@ function CheckRow({ controller, entry, title }) {
   const { record, id } = entry;
   return html`<li class="check-row">
     <button class="check-open" aria-label=${`Open ${title}, ${endsOf(record)}`} onClick=${() => controller.show({ name: 'check', id, at: '/place' })}>
-      <b>${title}</b><span>${endsOf(record)}</span>
-      <small>changed ${shownTime(record.changed)}${entry.origin ? `; ${entry.origin}` : ''}</small></button>
+      <b>${title}</b> <span>${endsOf(record)}</span></button>
+    <small class="check-when">changed ${shownTime(record.changed)}${entry.origin ? `; ${entry.origin}` : ''}</small>
     <div class="row-keys"><button class="key" aria-label=${`Duplicate ${title}`} onClick=${() => { void controller.library.duplicate(id).catch(controller.fail); }}>Duplicate</button>
       <button class="key" aria-label=${`Delete ${title}`} onClick=${() => { void controller.library.setDeleted(id, true).catch(controller.fail); }}>Delete</button></div>
   </li>`;

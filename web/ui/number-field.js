@@ -83,7 +83,7 @@ export function Means({ controller, field, big }) {
   const options = state.words.value.vocabulary[`means_${field.means}`] ?? state.words.value.vocabulary.means_load ?? [];
   const known = options.find((one) => one.id === draft.means);
   if (known && !big && !open && known.id !== 'stated') {
-    return html`<button class="key key-known" aria-label=${`${field.name}, change how known`} onClick=${() => setOpen(true)}>How known: ${known.label}<small>change</small></button>`;
+    return html`<button class="key key-known" aria-label=${`How known: ${known.label}, change, ${field.name}`} onClick=${() => setOpen(true)}>How known: ${known.label} <small>change</small></button>`;
   }
   return html`<div class=${big ? 'means means-big' : 'means'}>
     <${Choices} name=${`${field.name}, how known`} legend=${big ? `${field.label}: how is it known?` : 'How known'} options=${options} value=${draft.means ?? null} small=${!big}
