@@ -36,7 +36,7 @@ def main() -> None:
         phone.get_by_role("button", name="Outcome:").tap()
         phone.wait_for_timeout(500)
         phone.screenshot(path=PICTURES / "result-phone.png")
-        phone.locator("section[aria-label=Drawings] svg").nth(2).scroll_into_view_if_needed()
+        phone.locator("section[aria-label=Drawings] svg").nth(0).scroll_into_view_if_needed()
         phone.wait_for_timeout(300)
         phone.screenshot(path=PICTURES / "diagrams-phone.png")
         desk = demonstration(playwright, site.url, DESK)

@@ -167,17 +167,18 @@ def cross_section(x: float, y: float) -> str:
     return hatched(x - 5, y, 10, 18, 4) + polyline(outline, "ground", closed=True, stroke_width="1.2")
 
 
-def key_rows(*, flat: str, worst: bool, least: bool, railed: bool) -> list[KeyRow]:
-    """flat: the words of a curve that is nowhere different from zero, else empty. worst, least, railed: what is drawn."""
+def key_rows(*, flat: str, worst: bool, least: bool, railed: bool, factored: bool) -> list[KeyRow]:
+    """flat: the words of a curve that is nowhere different from zero, else empty. worst, least, railed: what is drawn;
+    factored: whether the worst case carries factors (sag never does)."""
     rows = [("", flat)] if flat else [("curve", "best estimate, unfactored")]
     if worst:
-        rows.append(("curve-high", "worst case, with the factors of the limit" + ":" * railed))
+        rows.append(("curve-high", f"worst case, {'with the factors of the limit' if factored else 'unfactored'}" + ":" * railed))
         rows += [("", "the line to be kept inside the rails")] if railed else []
     return [*rows, ("curve-least", "least effect: only to look at")] if least else rows
 
 
-def key(rows: Sequence[KeyRow], top: float, *, ring: bool) -> tuple[list[str], float]:
-    """Markup, and the ordinate below it. ring: also the mark of a governing place, best estimate with factors."""
+def key(rows: Sequence[KeyRow], top: float, *, ring: str) -> tuple[list[str], float]:
+    """Markup, and the ordinate below it. ring: also the mark of a governing place, with these words."""
     parts = []
     for k, (kind, words) in enumerate(rows):
         y = top + KEY_LINE * (k + 1)
@@ -186,7 +187,7 @@ def key(rows: Sequence[KeyRow], top: float, *, ring: bool) -> tuple[list[str], f
         parts.append(text(LEFT if bare else WORDS, y, words, "label-small", anchor="start", size=SMALL))
     if ring:
         parts += [*rings(RING_AT, top + KEY_LINE - 4, (3, 6)),
-                  text(RING_AT + 12, top + KEY_LINE, "factored", "label-small", anchor="start", size=SMALL)]
+                  text(RING_AT + 12, top + KEY_LINE, ring, "label-small", anchor="start", size=SMALL)]
     return parts, top + KEY_LINE * len(rows)
 
 
