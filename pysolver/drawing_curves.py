@@ -87,9 +87,10 @@ def curve(quantity: Quantity, response: Response, layout: Layout, *, high: Seque
              base_line(figure, layout, names), _best(figure, pieces),
              *(ring for one in governing for ring in rings(figure.x(one.x), figure.y(one.value))), labels.markup]
     flat = "" if any(_reach(pieces, (), floor)) else f"{NAUGHT[quantity]} under these loads"
+    ring = ("governs" if quantity == "sag" else "factored") if governing else ""
     drawn_key, foot = key(key_rows(flat=flat, worst=any(worst for worst, _ in sides), railed=bool(near),
                                       least=any(least for _, least in sides), factored=quantity != "sag"),
-                    figure.bottom + 26.0 + NAME_ROW * max(name_rows(figure, layout, names)), ring=("governs" if quantity == "sag" else "factored") if governing else "")
+                    figure.bottom + 26.0 + NAME_ROW * max(name_rows(figure, layout, names)), ring=ring)
     notes = [*labels.homeless, *_beyond(far), *_left_out(labels.left_out)]
     parts += drawn_key + [svg.text(10, foot + 15 * (k + 1), note, "label-small", anchor="start", size=svg.SMALL)
                     for k, note in enumerate(notes)]
