@@ -8,7 +8,7 @@ point gains only the square of that little. At most eight variables are varied t
 that alone makes a criterion worse. A search is no proof: the result says "searched".
 """
 
-from collections.abc import Callable, Sequence
+from collections.abc import Generator, Sequence
 from dataclasses import dataclass
 from itertools import product
 
@@ -24,7 +24,7 @@ CLIMBS = 8
 STEPS = np.array([-1.0, -0.4, -0.1, 0.1, 0.4, 1.0])
 GAIN = 1e-5  # of the value: smaller gains end the climb
 
-Evaluate = Callable[[Floats], Floats]
+Asking = Generator[Floats, Floats, "Found"]  # yields points (C, n) and is sent their values (C, K)
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -37,28 +37,29 @@ class Searched:
     together: tuple[int, ...]
 
 
-def search(evaluate: Evaluate, low: Floats, best: Floats, high: Floats, *, wide: NDArray[np.bool_],
-           starts: Floats) -> Searched:
-    """evaluate(points (C, n)) -> values (C, K), called with points of the box [low, high]; best is one of them.
+def search(low: Floats, best: Floats, high: Floats, *, wide: NDArray[np.bool_],
+           starts: Floats) -> Generator[Floats, Floats, Searched]:
+    """Yields points (C, n) of the box [low, high] and must be sent their values (C, K); returns what it found. So whoever
+    evaluates them may do so in slices, and stop. best is one of the points.
 
     wide (n,): whose range is wide. starts (m, n): further points to begin from.
     """
-    ends = _ends(evaluate, low, best, high)
+    ends = yield from _ends(low, best, high)
     together = _most_telling(ends)
-    found = _best_of(evaluate, np.concatenate([_starts(low, best, high, together, wide), starts]), None)
+    found = yield from _best_of(np.concatenate([_starts(low, best, high, together, wide), starts]), None)
     rest = np.array([i not in together for i in range(len(low))], bool)
     if rest.any():
         worse_end = np.where(ends[1] > ends[0], high[:, None], low[:, None]).T
-        found = _best_of(evaluate, np.where(rest, worse_end, found[1]), found)
-    worst, at = _climb(evaluate, found, low, high, wide)
+        found = yield from _best_of(np.where(rest, worse_end, found[1]), found)
+    worst, at = yield from _climb(found, low, high, wide)
     return Searched(worst=worst, points=at, together=tuple(together))
 
 
 Found = tuple[Floats, Floats]  # for each criterion the largest value (K,) and its point (K, n)
 
 
-def _best_of(evaluate: Evaluate, points: Floats, before: Found | None) -> Found:
-    values = evaluate(points)
+def _best_of(points: Floats, before: Found | None) -> Asking:
+    values = yield points
     top = values.argmax(axis=0)
     worst, at = values[top, np.arange(values.shape[1])], points[top]
     if before is None:
@@ -67,13 +68,13 @@ def _best_of(evaluate: Evaluate, points: Floats, before: Found | None) -> Found:
     return np.where(better, worst, before[0]), np.where(better[:, None], at, before[1])
 
 
-def _ends(evaluate: Evaluate, low: Floats, best: Floats, high: Floats) -> tuple[Floats, Floats, Floats]:
+def _ends(low: Floats, best: Floats, high: Floats) -> Generator[Floats, Floats, tuple[Floats, Floats, Floats]]:
     """(n, K) at the low end and at the high end of each variable alone, and (1, K) at best."""
     n = len(low)
     points = np.tile(best, (2 * n + 1, 1))
     points[np.arange(n), np.arange(n)] = low
     points[n + np.arange(n), np.arange(n)] = high
-    values = evaluate(points)
+    values = yield points
     return values[:n], values[n:2 * n], values[2 * n:]
 
 
@@ -84,7 +85,7 @@ def _most_telling(ends: tuple[Floats, Floats, Floats]) -> list[int]:
     return sorted(np.argsort(-telling, kind="stable")[:TOGETHER].tolist())
 
 
-def _climb(evaluate: Evaluate, found: Found, low: Floats, high: Floats, wide: NDArray[np.bool_]) -> Found:
+def _climb(found: Found, low: Floats, high: Floats, wide: NDArray[np.bool_]) -> Asking:
     """From each criterion's worst point along each wide range, in steps that shrink when nothing is gained."""
     climbing = np.full(len(found[0]), bool(wide.any()))
     reach = 0.5 * (high - low)
@@ -92,7 +93,7 @@ def _climb(evaluate: Evaluate, found: Found, low: Floats, high: Floats, wide: ND
         if not climbing.any():
             break
         before = found[0]
-        found = _best_of(evaluate, _neighbours(np.unique(found[1][climbing], axis=0), low, high, reach, wide), found)
+        found = yield from _best_of(_neighbours(np.unique(found[1][climbing], axis=0), low, high, reach, wide), found)
         climbing &= found[0] > before + GAIN * np.abs(before)
         reach = 0.5 * reach
     return found

@@ -6,13 +6,15 @@ message}}. kind "input": the person can put it right; "internal": our fault, and
 
 import json
 import os
-from collections.abc import Callable
+import time
+from collections.abc import Callable, Generator
+from itertools import count
 from typing import Any
 
 import pysolver
 from pysolver.answer import answer, versions
 from pysolver.beam import Beam, Stretch, Support
-from pysolver.check import run_check
+from pysolver.check import Result, check_in_slices, run_check
 from pysolver.demo import demo
 from pysolver.display import System, also, field_units, show
 from pysolver.errors import InputError, InternalError
@@ -29,6 +31,7 @@ from pysolver.vocabulary import words
 pysolver.BUILD = os.environ.get("ASFOUND_BUILD", pysolver.BUILD)
 
 MAX_REQUEST = 4_000_000  # characters
+SLICE = 0.05  # s
 STEPS = {"metric": ("-500 mm", "-100 mm", "-10 mm", "10 mm", "100 mm", "500 mm"), "us": ("-12 in", "-1 in", "1 in", "12 in")}
 QR_LONGEST = 1000  # characters of a link that a phone's camera still reads from a phone's screen
 
@@ -103,9 +106,40 @@ def step(request: dict[str, Any]) -> dict[str, Any]:
     return {"text": show("length", there, system)}
 
 
+Going = tuple[int, Generator[None, None, Result], str | None]
+_tokens = count(1)
+_going: list[Going] = []  # the one check that is under way in slices: a newer one takes its place
+
+
 def check(request: dict[str, Any]) -> dict[str, Any]:
-    """The check of a record; stage "best" comes first and fast, "full" with the ranges."""
-    return answer(run_check(request["record"], full=request.get("stage") != "best"), request.get("now"))
+    """The check of a record; stage "best" comes first and fast, "full" with the ranges.
+
+    With "sliced", what takes longer than SLICE answers {"more": token}: ask go_on with it, or drop it for good.
+    """
+    full, now = request.get("stage") != "best", request.get("now")
+    if not request.get("sliced"):
+        return answer(run_check(request["record"], full=full), now)
+    _going[:] = [(next(_tokens), check_in_slices(request["record"], full=full), now)]
+    return _one_slice()
+
+
+def go_on(request: dict[str, Any]) -> dict[str, Any]:
+    """The next slice of the check that answered {"more": token}."""
+    if not _going or _going[0][0] != request["token"]:
+        raise InternalError(code="dropped", message="A newer check took the place of this one.")
+    return _one_slice()
+
+
+def _one_slice() -> dict[str, Any]:
+    token, steps, now = _going[0]
+    began = time.monotonic()
+    try:
+        while time.monotonic() - began < SLICE:
+            next(steps)
+    except StopIteration as end:
+        _going.clear()
+        return answer(end.value, now)
+    return {"more": token}
 
 
 def link(request: dict[str, Any]) -> dict[str, Any]:
@@ -127,7 +161,7 @@ def file(request: dict[str, Any]) -> dict[str, Any]:
 
 CALLS: dict[str, Callable[[dict[str, Any]], dict[str, Any]]] = {
     "hello": hello, "self_check": self_check, "demo": lambda request: {"record": demo()}, "read": read, "step": step,
-    "check": check,
+    "check": check, "go_on": go_on,
     "link": link, "open": open_, "file": file}
 
 
@@ -140,6 +174,7 @@ def examples() -> list[str]:
         {"call": "read", "dimension": "length", "text": "18' 4 1/2\"", "unit": "m"},
         {"call": "step", "text": "2.3", "unit": "m", "by": "-10 mm"},
         {"call": "check", "record": record, "stage": "best"}, {"call": "check", "record": record, "stage": "full"},
+        {"call": "check", "record": record, "stage": "full", "sliced": True},
         {"call": "link", "record": record, "app_url": "https://example.invalid/"}, {"call": "open", "fragment": fragment},
         {"call": "file", "record": record}, {"call": "check", "record": blank(), "stage": "full"}]
     return [json.dumps(request) for request in asked]

@@ -7,6 +7,7 @@ Everything a person can have written wrongly ends as an InputError in `errors`, 
 worked out all the same are worked out (J23). SI units and signs as in statics.py.
 """
 
+from collections.abc import Generator
 from dataclasses import dataclass
 from typing import Any
 
@@ -14,12 +15,13 @@ from pysolver.combinations import sets
 from pysolver.errors import InputError
 from pysolver.facts import Gap, distressed, gaps
 from pysolver.found import missing
-from pysolver.governing import LIFTS, Governed, govern, infinite_hold_down, least_reaction, total_load
+from pysolver.governing import LIFTS, Governed, govern, infinite_hold_down, least_reaction
 from pysolver.limits import set_of
 from pysolver.model import Model, model, stiffness_known, stiffness_needed
 from pysolver.outcome import Compared, Outcome, decide
 from pysolver.readings import Readings, read_all
 from pysolver.record import Record, contradictions, validated
+from pysolver.searching import total_load
 from pysolver.statics import Response, solve
 
 
@@ -43,6 +45,17 @@ def run_check(document: Any, *, full: bool = True) -> Result:
 
     Raises InputError only when the document is no record at all.
     """
+    steps = check_in_slices(document, full=full)
+    while True:
+        try:
+            next(steps)
+        except StopIteration as end:
+            result: Result = end.value
+            return result
+
+
+def check_in_slices(document: Any, *, full: bool = True) -> Generator[None, None, Result]:
+    """run_check that yields between slices of work, so that a phone can answer others meanwhile, or give it up."""
     record = validated(document)
     readings = read_all(record)
     unfinished = [*contradictions(record), *blocking(readings), *missing(record, readings), *stiffness_asked(record, readings)]
@@ -53,7 +66,7 @@ def run_check(document: Any, *, full: bool = True) -> Result:
         layout = ready.layouts(ready.best_point()[None, :], ready.ways[0])[0]
         response = solve(layout.beam, layout.loads)
         facts = gaps(record, readings, layout, (*readings.errors, *ready.errors))
-        governed = govern(ready, facts, full=full)
+        governed = yield from govern(ready, facts, full=full)
     except InputError as error:
         return _unfinished(record, readings, [error])
     compared = (*governed.compared, *infinite_hold_down(ready, governed.best, governed.least))

@@ -6,6 +6,7 @@ solution for many beams of one shape at once. Method and source: see statics.py,
 
 from collections.abc import Sequence
 from dataclasses import dataclass
+from itertools import pairwise
 
 import numpy as np
 from numpy.typing import NDArray
@@ -87,7 +88,8 @@ def nodes_of(beams: Sequence[Beam]) -> Nodes:
 def _node_places(beam: Beam) -> list[tuple[float, bool]]:
     """(x, is a hinge) of every element end, in order, places nearer than SAME_PLACE made one."""
     places = [(s.x, False) for s in beam.supports] + [(0.0, False), (beam.length, False)]
-    places += [(h, True) for h in beam.hinges] + [(s.end, False) for s in beam.stretches[:-1]]
+    places += [(h, True) for h in beam.hinges]
+    places += [(a.end, False) for a, b in pairwise(beam.stretches) if a.bending_stiffness != b.bending_stiffness]
     merged: list[tuple[float, bool]] = []
     for x, hinge in sorted(places):
         if merged and x - merged[-1][0] < SAME_PLACE:

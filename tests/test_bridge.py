@@ -47,7 +47,8 @@ def test_every_call_answers(request_: dict[str, Any]) -> None:
 
 
 def test_there_is_an_example_for_every_call() -> None:
-    assert {request["call"] for request in EXAMPLES} == set(CALLS)
+    """But for going on with a check, which takes the token of one that is under way."""
+    assert {request["call"] for request in EXAMPLES} == set(CALLS) - {"go_on"}
 
 
 @pytest.mark.parametrize("text", ["", "null", "[]", "3", "{", '{"call": 3}', '{"call": "__class__"}', '{"call": null}', "\x00",
@@ -236,3 +237,20 @@ def test_a_distance_moves_by_the_step_that_was_pressed(asked_for: dict[str, str]
 
 def test_a_step_never_goes_behind_the_point_measured_from() -> None:
     assert asked({"call": "step", "text": "5 mm", "unit": "m", "by": "-10 mm"})["error"]["code"] == "negative"
+
+
+def test_a_check_in_slices_says_the_same_as_one_in_a_single_go() -> None:
+    request = {"call": "check", "record": demo(), "stage": "full", "now": "2031-05-04T10:00:00Z"}
+    whole, sliced = asked(request)["result"], asked({**request, "sliced": True})["result"]
+    slices = 0
+    while "more" in sliced:
+        sliced, slices = asked({"call": "go_on", "token": sliced["more"]})["result"], slices + 1
+    assert slices > 0
+    assert sliced == whole
+
+
+def test_a_newer_check_takes_the_place_of_one_under_way() -> None:
+    request = {"call": "check", "record": demo(), "stage": "full", "sliced": True}
+    first, second = asked(request)["result"]["more"], asked(request)["result"]["more"]
+    assert asked({"call": "go_on", "token": first})["error"]["code"] == "dropped"
+    assert asked({"call": "go_on", "token": second})["ok"]

@@ -14,7 +14,7 @@ LAYERS = [
     "__init__", "errors", "number_text", "unit_table", "display", "units", "piecewise",
     "beam", "loads", "mechanism", "stiffness", "statics", "envelope", "bounds",
     "record_validator", "record", "measured", "readings", "combinations", "vocabulary", "frame", "found", "limits", "facts",
-    "comparison", "model", "uplift", "outcome", "governing", "check",
+    "comparison", "model", "uplift", "searching", "outcome", "governing", "check",
     "svg", "drawing_bezier", "drawing_labels", "drawing_symbols", "drawing_loads", "drawing_places", "drawing_scheme",
     "drawing_body", "drawing_curve_labels", "drawing_curves", "drawing", "figures", "answer", "recorded",
     "json_text", "link_dictionary", "link", "demo", "bridge", "cli", "__main__",

@@ -10,7 +10,9 @@ export function createChecking({ ask, now, onAnswer, onError }) {
 
   /** @param {{seq:number, record:any, again:boolean}} job @param {string} stage */
   async function one(job, stage) {
-    const result = await ask('check', { record: job.record, now: now(), stage });
+    let result = await ask('check', { record: job.record, now: now(), stage, sliced: true });
+    // Between slices the solver answers others; a check that nobody wants any more is not asked to go on.
+    while (result.more && wanted === job) result = await ask('go_on', { token: result.more });
     if (wanted === job) onAnswer(job.seq, stage, result);
   }
 
