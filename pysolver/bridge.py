@@ -124,9 +124,9 @@ def check(request: dict[str, Any]) -> dict[str, Any]:
 
 
 def go_on(request: dict[str, Any]) -> dict[str, Any]:
-    """The next slice of the check that answered {"more": token}."""
+    """The next slice of the check that answered {"more": token}; {"dropped": true} when a newer one took its place."""
     if not _going or _going[0][0] != request["token"]:
-        raise InternalError(code="dropped", message="A newer check took the place of this one.")
+        return {"dropped": True}
     return _one_slice()
 
 
@@ -174,7 +174,7 @@ def examples() -> list[str]:
         {"call": "read", "dimension": "length", "text": "18' 4 1/2\"", "unit": "m"},
         {"call": "step", "text": "2.3", "unit": "m", "by": "-10 mm"},
         {"call": "check", "record": record, "stage": "best"}, {"call": "check", "record": record, "stage": "full"},
-        {"call": "check", "record": record, "stage": "full", "sliced": True},
+        {"call": "check", "record": record, "stage": "full", "sliced": True}, {"call": "go_on", "token": 0},
         {"call": "link", "record": record, "app_url": "https://example.invalid/"}, {"call": "open", "fragment": fragment},
         {"call": "file", "record": record}, {"call": "check", "record": blank(), "stage": "full"}]
     return [json.dumps(request) for request in asked]

@@ -13,7 +13,7 @@ export function createChecking({ ask, now, onAnswer, onError }) {
     let result = await ask('check', { record: job.record, now: now(), stage, sliced: true });
     // Between slices the solver answers others; a check that nobody wants any more is not asked to go on.
     while (result.more && wanted === job) result = await ask('go_on', { token: result.more });
-    if (wanted === job) onAnswer(job.seq, stage, result);
+    if (wanted === job && !result.dropped) onAnswer(job.seq, stage, result);
   }
 
   async function run() {
