@@ -59,6 +59,8 @@ def test_numbers_that_were_changed_in_a_link_are_told_apart(phone: Device) -> No
     page = solver_ready(phone.open("#" + encode(document)))
     agreement = page.get_by_role("region", name="Agreement")
     expect(agreement).to_contain_text("the numbers differ", timeout=START)
+    expect(page.get_by_role("alert")).to_contain_text("not those of the link")
+    agreement.get_by_text("Which numbers differ").tap()
     expect(agreement.get_by_role("row", name=name)).to_be_visible()
     expect(agreement.get_by_role("row", name="outcome")).to_contain_text("within")
 

@@ -163,7 +163,7 @@ def reactions(result: Result, system: System) -> list[dict[str, str]]:
 
 
 def _compared_names(result: Result) -> list[str]:
-    return [f"{c.title} with {name_of_sheet(result.record, c.sheet)}" for c in result.compared
+    return [f"{c.title} with {name_of_sheet(result.record, c.sheet)}" for c in by_weight(result.compared)
             if c.ratio is not None and result.record["limits"]]
 
 

@@ -25,10 +25,12 @@ function Read({ controller, opened }) {
   const { record, result, agreement } = opened;
   const keep = () => { void controller.sharing.keepOpened().then((/** @type {string} */ id) => controller.show({ name: 'check', id, at: '/place' })).catch(controller.fail); };
   return html`${result.clear_area && html`<div class="refusal" role="alert">${result.clear_area.lines.map((/** @type {string} */ line, /** @type {number} */ i) => (i ? html`<p>${line}</p>` : html`<h2>${line}</h2>`))}</div>`}
+    ${agreement.equal === false && html`<p class="standing" role="alert"><b>The numbers worked out here are not those of the link.</b> See below which; ask whoever sent it.</p>`}
     <p class="standing">To read only. Found by ${record.found_by.name || 'someone not named'}${record.found_at ? `, ${record.found_at.slice(0, 16).replace('T', ' ')}` : ''}. ${record.photos.length ? `${record.photos.length} photo${record.photos.length === 1 ? '' : 's'} stayed on the sender’s phone.` : ''}</p>
+    <${Verdict} result=${result} />
     <section class=${agreement.equal ? 'agreement' : 'agreement agreement-differs'} aria-label="Agreement"><h2>${agreement.equal ? 'Worked out again: the numbers are equal' : 'Worked out again: the numbers differ'}</h2><p>${agreement.shown}</p>
-      ${agreement.differs?.length > 0 && html`<table class="ruled"><thead><tr><th scope="col">Number</th><th scope="col">In the link</th><th scope="col">Here</th></tr></thead><tbody>${agreement.differs.map((/** @type {any} */ one) => html`<tr><th scope="row">${one.name}</th><td>${one.recorded}</td><td>${one.now}</td></tr>`)}</tbody></table>`}</section>
-    <${Verdict} result=${result} /><${CriteriaTable} result=${result} /><${ReactionsTable} result=${result} /><${ResultDrawings} controller=${controller} result=${result} />
+      ${agreement.differs?.length > 0 && html`<details><summary>Which numbers differ</summary><table class="ruled"><thead><tr><th scope="col">Number</th><th scope="col">In the link</th><th scope="col">Here</th></tr></thead><tbody>${agreement.differs.map((/** @type {any} */ one) => html`<tr><th scope="row">${one.name}</th><td>${one.recorded}</td><td>${one.now}</td></tr>`)}</tbody></table></details>`}</section>
+    <${CriteriaTable} result=${result} /><${ReactionsTable} result=${result} /><${ResultDrawings} controller=${controller} result=${result} />
     <h2>The record in words</h2><${InWords} record=${record} result=${result} words=${controller.state.words.value} />
     <${Lists} result=${result} />
     <button class="key key-main" onClick=${keep}>Keep a copy as a new check</button>`;
