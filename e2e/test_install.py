@@ -8,7 +8,7 @@ import zipfile
 from collections.abc import Callable
 from pathlib import Path
 
-from browsing import START, ready_without_signal, solver_ready
+from browsing import START, Device, ready_without_signal, solver_ready
 from conftest import MakeDevice
 from playwright.sync_api import Page, expect
 from serving import SiteProcess
@@ -137,3 +137,11 @@ def test_without_web_assembly_it_says_so_and_entries_are_kept_and_exported(dist:
         records = json.loads(packed.read("records.json"))["records"]
     assert [one["place"]["member"] for one in records] == ["B3"]
     expect(page.get_by_text("1 check and 0 photos handed")).to_be_visible()
+
+
+def test_the_browser_finds_nothing_that_keeps_it_from_being_installed(phone: Device) -> None:
+    """Asked of Chromium itself, from the cache alone: manifest, icons, service worker."""
+    page = solver_ready(phone.open())
+    browser = page.context.new_cdp_session(page)
+    assert browser.send("Page.getAppManifest")["errors"] == []
+    assert browser.send("Page.getInstallabilityErrors")["installabilityErrors"] == []
