@@ -10,6 +10,7 @@ from collections.abc import Iterator, Sequence
 from dataclasses import dataclass
 from typing import Any
 
+from pysolver.beam import SHORTEST
 from pysolver.combinations import sets
 from pysolver.display import System, show
 from pysolver.errors import InputError
@@ -164,16 +165,27 @@ def _issued_span(readings: Readings, layout: Layout, i: int, name: str, system: 
                   moments=True)
         return
     for_span = show("length", issued, system)
-    for k, (start, end) in enumerate(layout.spans):
-        path, measured = f"/spans/{k}/length", readings.measured[f"/spans/{k}/length"]
-        if end - start > issued + TAPE:
-            yield Gap(text=f"the span found, {show('length', end - start, system)}, is longer than the {for_span} that {name} "
-                           "was issued for",
+    for what, path, found in _lengths(layout):
+        measured = readings.measured[path]
+        if found > issued + TAPE:
+            yield Gap(text=f"the {what} found, {show('length', found, system)}, is longer than the {for_span} that {name} was "
+                           "issued for",
                       who=OFFICE, path=path, sheet=i, moments=True, void=True)
             return
-        if end - start + measured.high - measured.best > issued + 2 * TAPE:
-            yield Gap(text=f"whether the span is longer than the {for_span} that {name} was issued for: it may be",
+        if found + measured.high - measured.best > issued + 2 * TAPE:
+            yield Gap(text=f"whether the {what} is longer than the {for_span} that {name} was issued for: it may be",
                       who="whoever can tape it", path=path, sheet=i, moments=True)
+
+
+def _lengths(layout: Layout) -> Iterator[tuple[str, str, float]]:
+    """(what, path, m) of every span, and of every overhang: an overhang that is longer than the issued span has a longer
+    compression flange too."""
+    for k, (start, end) in enumerate(layout.spans):
+        yield "span", f"/spans/{k}/length", end - start
+    if layout.supports[0] > SHORTEST:
+        yield "overhang", "/overhangs/left", layout.supports[0]
+    if layout.beam.length - layout.supports[-1] > SHORTEST:
+        yield "overhang", "/overhangs/right", layout.beam.length - layout.supports[-1]
 
 
 def _issued_spacing(readings: Readings, i: int, name: str, found: dict[str, Any], system: System) -> Iterator[Gap]:

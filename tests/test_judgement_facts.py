@@ -294,6 +294,17 @@ def test_J6_one_longer_span_of_several_withholds_the_moment_limit() -> None:
     assert outcome_of(beam(["5.00 m", "5.05 m"], limits=limits)) == "cannot"
 
 
+def test_J6_an_overhang_longer_than_the_issued_span_withholds_the_moment_limit() -> None:
+    limits = [generous(restraint="spacing", span=bare("4.00 m"), restraint_spacing=bare("9 m"))]
+    assert not gaps_of(beam(["4.00 m"], right="1.50 m", kinds=["pinned", "bearing"], limits=limits))
+    longer = beam(["4.00 m"], right="4.20 m", kinds=["pinned", "bearing"], limits=limits)
+    assert any("overhang" in text for text in gaps_of(longer))
+
+
+def gaps_of(record: dict) -> list[str]:  # type: ignore[type-arg]
+    return [gap.text for gap in run_check(record).outcome.gaps if "longer" in gap.text]
+
+
 def test_J6_wider_restraint_withholds_a_moment_limit() -> None:
     record = simple(limits=issued_for("6.00 m", "2.00 m"))
     record["restraint"] = {"answer": "spacing", "spacing": q("2.00 m")}
