@@ -51,7 +51,6 @@ class Compared:
     under: str = "total"
     withheld: tuple[Gap, ...] = ()
     ranged: bool = True
-    bounded: bool = True
 
     @property
     def title(self) -> str:
@@ -66,7 +65,7 @@ class Compared:
 
 def state(one: Compared) -> str:
     """within, close, over or cannot for one criterion by itself; working while its range is not worked out yet."""
-    if one.over_either_way or (one.ratio is not None and one.ratio > 1.0):
+    if numbers_over(one):
         voided = any(gap.void for gap in one.withheld)
         return CANNOT if voided else OVER
     if one.ratio is None or one.withheld:
