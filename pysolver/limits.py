@@ -101,6 +101,10 @@ def _refuse_incomplete(record: Record, readings: Readings, entry: dict[str, Any]
     if entry["support"] is not None and entry["support"] >= len(record["supports"]):
         raise InputError(code="limit", field=f"{path}/support",
                          message="This limit is for a support that the beam does not have. Pick the support again.")
+    position = entry["zone"] and entry["zone"]["position"]
+    if position and position["from"] == "support" and (position["support"] or 0) >= len(record["supports"]):
+        raise InputError(code="zone", field=f"{path}/zone",
+                         message="Where this limit holds was measured from a support that the beam does not have. Pick it again.")
     if entry["zone"] is not None and not zone_complete(entry["zone"], f"{path}/zone", readings):
         raise InputError(code="zone", field=f"{path}/zone", message="Where this limit holds is not entered in full: give the "
                          "point it is measured from, the distance and the length, or let it hold over the whole beam.")

@@ -405,6 +405,15 @@ def test_J7_the_higher_of_two_reaction_limits_is_never_used(entries: list) -> No
     assert result.outcome.word == "over"
 
 
+def test_J7_a_zone_from_a_support_that_does_not_exist_is_never_moved_to_another() -> None:
+    place = {"from": "support", "support": 7, "side": "left", "at": "centre", "to": "near_edge", "distance": bare("0 m")}
+    record = simple(limits=[generous()])
+    record["limits"][0]["entries"][0]["zone"] = {"position": place, "length": bare("6.00 m")}
+    result = run_check(record)
+    assert result.outcome.word == "cannot"
+    assert "/limits/0/entries/0/zone" in [error.field for error in result.errors]
+
+
 def test_J7_a_zone_is_never_stretched_to_the_span_found() -> None:
     """Drawn spans of 4 m: hogging limit from 3.0 to 5.0 m of the member. Found spans of 5.2 m: B is outside the zone."""
     limits = hogging_in(("90 kNm", zone("2.90 m", "2.20 m")))
