@@ -11,7 +11,7 @@ from typing import Any
 from pysolver.errors import InputError
 from pysolver.found import Layout, zone_complete
 from pysolver.readings import Readings
-from pysolver.record import Record
+from pysolver.record import Record, from_no_support
 
 STRENGTH = ("sagging", "hogging", "shear")
 SAG_RATIO_RANGE = (50.0, 5000.0)
@@ -101,8 +101,7 @@ def _refuse_incomplete(record: Record, readings: Readings, entry: dict[str, Any]
     if entry["support"] is not None and entry["support"] >= len(record["supports"]):
         raise InputError(code="limit", field=f"{path}/support",
                          message="This limit is for a support that the beam does not have. Pick the support again.")
-    position = entry["zone"] and entry["zone"]["position"]
-    if position and position["from"] == "support" and (position["support"] or 0) >= len(record["supports"]):
+    if entry["zone"] is not None and from_no_support(entry["zone"]["position"], record):
         raise InputError(code="zone", field=f"{path}/zone",
                          message="Where this limit holds was measured from a support that the beam does not have. Pick it again.")
     if entry["zone"] is not None and not zone_complete(entry["zone"], f"{path}/zone", readings):

@@ -72,9 +72,16 @@ def _no_such_support(record: Record) -> Iterator[InputError]:
     things += [(f"/hinges/{i}/position", hinge["position"]) for i, hinge in enumerate(record["hinges"])]
     things += [(f"/section/zones/{i}/position", zone["position"]) for i, zone in enumerate(record["section"]["zones"])]
     for path, position in things:
-        if position and position["from"] == "support" and (position["support"] or 0) >= len(record["supports"]):
+        if from_no_support(position, record):
             yield InputError(code="no_support", field=f"{path}/support",
                              message="This was measured from a support that the beam does not have. Pick the support again.")
+
+
+def from_no_support(position: Record | None, record: Record) -> bool:
+    """Whether a position was measured from a support that the beam does not have."""
+    if position is None or position["from"] != "support":
+        return False
+    return (position["support"] or 0) >= len(record["supports"])
 
 
 def _no_such_time(record: Record) -> Iterator[InputError]:
